@@ -28,7 +28,7 @@ function assertField(field: Field, x: unknown, where: string): void {
 }
 
 function assertType(type: Type, field: Field, x: unknown, where: string): void {
-  if (isKind(type)) return assertPossible(x, type, field.possible, where);
+  if (isKind(type)) return void assertPossible(x, type, field.possible, where);
   switch (type.type) {
     case "optional":
       if (x !== null && x !== undefined) assertType(type.of, field, x, where);
@@ -87,8 +87,9 @@ export const fieldRules = (fields: Fields<Shape>): RangeRule[] =>
             kind: f.kind,
             range: f.range,
             stated: f.stated ?? true,
+            note: f.note,
             of: (args: { readonly [n: string]: number }) => args[name] as number,
-          } as RangeRule,
+          },
         ]
       : [],
   );

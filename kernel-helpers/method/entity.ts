@@ -23,7 +23,8 @@ export function entity<I extends string, F extends Shape, V extends Values<F>>(
   const build = (values: Values<F>): V => {
     const whole = complete(fields, values);
     assertFields(fields, whole, parts.id);
-    return parts.build(whole as Values<F>);
+    const built = parts.build(whole as Values<F>);
+    return Object.defineProperty(built, TAG, { value: parts.id });
   };
   return Object.assign((values: Entered<F>) => build(values as Values<F>), {
     ...parts,
@@ -31,6 +32,12 @@ export function entity<I extends string, F extends Shape, V extends Values<F>>(
     build,
   });
 }
+
+// A symbol of the realm's registry, so that two loaded copies of the package know each other's objects.
+const TAG = Symbol.for("stillwell.entity");
+/** The id of the entity that made an object; null when none did. */
+export const entityTag = (x: unknown): string | null =>
+  typeof x === "object" && x !== null && TAG in x ? String(x[TAG]) : null;
 
 /** An absent optional field is `null`, so that its own property exists. */
 const complete = (

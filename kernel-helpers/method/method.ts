@@ -60,7 +60,8 @@ export interface MethodParts<S extends Shape, K extends Kind> {
   };
   readonly output: { readonly kind: K; readonly symbol: string; readonly note: string };
   readonly compute: (args: Bare<S>) => number;
-  readonly uses?: readonly { readonly id: string; readonly revision: number }[];
+  /** The methods this one composes. */
+  readonly uses?: readonly MethodFacts[];
   readonly checks: readonly Check<S, K>[];
   readonly direction?: Direction;
   /** Cautions that a package shows when this method is used. */
@@ -71,16 +72,40 @@ export interface MethodParts<S extends Shape, K extends Kind> {
   readonly family: string;
 }
 
+/** What can be told of a method whatever its inputs are: for registries, records and catalogues. */
+export interface MethodFacts {
+  readonly role: "method";
+  readonly id: string;
+  readonly revision: number;
+  readonly title: string;
+  readonly family: string;
+  readonly tex: string;
+  readonly source: Source;
+  readonly inputs: Fields<Shape>;
+  readonly result: { readonly kind: Kind; readonly symbol: string; readonly note: string };
+  readonly rules: readonly RangeRule[];
+  readonly uses: readonly MethodFacts[];
+  readonly checks: readonly {
+    readonly from: Source;
+    readonly basis: Basis;
+    readonly rows: readonly { readonly printed: string }[];
+  }[];
+  readonly direction?: Direction;
+  readonly cautions?: readonly string[];
+  readonly dimensional?: string;
+}
+
 export interface Method<S extends Shape = Shape, K extends Kind = Kind>
   extends
     Use<S, K>,
-    Omit<
+    Pick<
       MethodParts<S, K>,
-      "compute" | "uses" | "output" | "inputs" | "id" | "revision" | "title"
+      "family" | "tex" | "source" | "within" | "checks" | "direction" | "cautions" | "dimensional"
     > {
   /** Explore: checks what is possible, returns a quantity. */
   (args: Entered<S>): Quantity<K>;
   readonly role: "method";
+  readonly uses: readonly MethodFacts[];
   readonly result: { readonly kind: K; readonly symbol: string; readonly note: string };
   /** For solvers: bare SI numbers, names checked, nothing else. */
   readonly si: (args: Bare<S>) => number;
@@ -98,7 +123,8 @@ export function method<S extends Shape, K extends Kind>(parts: MethodParts<S, K>
       kind: "dimensionless" as const,
       range: g.range,
       stated: g.stated,
-      of: g.of as RangeRule["of"],
+      ...(g.note === undefined ? {} : { note: g.note }),
+      of: g.of,
     })),
   ];
   const value = (args: Values<S>): number => {

@@ -1,7 +1,7 @@
 import { assertFields } from "./assert-fields.js";
 import type { Fields, Shape, Struct } from "./descriptors.js";
 import type { Finding } from "./finding.js";
-import type { Method } from "./method.js";
+import type { Method, MethodFacts } from "./method.js";
 import { RangeWatch } from "./range-check.js";
 import type { Bare, Entered, Plains, Values } from "./readings.js";
 import type { Outcome, Stop, Use } from "./use.js";
@@ -23,7 +23,7 @@ export interface ModelParts<I extends string, S extends Shape, R extends Shape> 
   readonly title: string;
   /** What it solves and what it leaves out, in sentences for the package. */
   readonly about: readonly string[];
-  readonly uses: readonly Method<never, Kind>[];
+  readonly uses: readonly MethodFacts[];
   /** Numerical tolerances, stated in the package. */
   readonly tolerances: { readonly [name: string]: number };
   readonly inputs: Fields<S>;
@@ -45,6 +45,7 @@ export interface Model<I extends string = string, S extends Shape = Shape, R ext
   /** The result, or a typed stop. */
   (args: Entered<S>): Values<R> | Stop;
   readonly role: "model";
+  readonly uses: readonly MethodFacts[];
   /** The result with its findings and diagnostics. */
   readonly explain: (args: Entered<S>) => Explained<R>;
 }
@@ -98,7 +99,7 @@ export function model<I extends string, S extends Shape, R extends Shape>(
     ...rest,
     role: "model" as const,
     inputs,
-    uses: uses.map(({ id, revision }) => ({ id, revision })),
+    uses,
     output,
     apply,
     explain,

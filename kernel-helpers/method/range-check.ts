@@ -8,6 +8,7 @@ export interface RangeRule {
   readonly kind: Kind;
   readonly range: Range;
   readonly stated: boolean;
+  readonly note?: string;
   of(args: never): number;
 }
 

@@ -1,0 +1,16 @@
+export * from "./chart-use.js";
+export * from "./declared.js";
+export * from "./edges-of.js";
+export * from "./item.js";
+export * from "./lineage.js";
+export * from "./node.js";
+export * from "./parse-record.js";
+export * from "./plain.js";
+export * from "./record.js";
+export * from "./replay.js";
+export * from "./scope.js";
+export * from "./study.js";
+export * from "./type-json.js";
+export * from "./version.js";
+export * from "./wires.js";
+export type { Verdict } from "./inline-uses.js";
