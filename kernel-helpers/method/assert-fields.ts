@@ -56,7 +56,7 @@ function assertType(type: Type, field: Field, x: unknown, where: string): void {
         assertPossible(
           d,
           "measuredDepth",
-          i > 0 ? { above: depth[i - 1] as number } : undefined,
+          i > 0 ? { from: depth[i - 1] as number } : undefined,
           `${where}.depth[${i}]`,
         );
       });

@@ -67,7 +67,10 @@ export interface Along<K extends Kind> {
 export const list = <T extends Type>(each: T): List<T> => ({ type: "list", each });
 export const oneOf = <C extends string>(...among: C[]): OneOf<C> => ({ type: "oneOf", among });
 export const profile = <K extends Kind>(of: K): Profile<K> => ({ type: "profile", of });
-export const anyOf = <S extends Struct>(...among: S[]): AnyOf<S> => ({ type: "anyOf", among });
+export const anyOf = <S extends readonly Struct[]>(...among: S): AnyOf<S[number]> => ({
+  type: "anyOf",
+  among,
+});
 export const optional = <T extends Present>(of: T): Optional<T> => ({ type: "optional", of });
 export const text: Text = { type: "text" };
 

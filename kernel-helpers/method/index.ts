@@ -7,5 +7,6 @@ export * from "./finding.js";
 export * from "./method.js";
 export * from "./model.js";
 export * from "./range-check.js";
+export * from "./read-profile.js";
 export * from "./readings.js";
 export * from "./use.js";

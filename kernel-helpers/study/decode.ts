@@ -1,5 +1,5 @@
 import { StudyError } from "../errors/index.js";
-import { typeName, type Along, type Type } from "../method/index.js";
+import { readProfile, typeName, type Along, type Type } from "../method/index.js";
 import { isKind, type Kind } from "../units/index.js";
 import type { Node } from "./node.js";
 
@@ -73,7 +73,7 @@ function readRef(
       type: next,
       live:
         typeof p === "object"
-          ? readAlong(
+          ? readProfile(
               at.live as Along<Kind>,
               decode("measuredDepth", p.depth, get, node.ref) as number,
               node.ref,
@@ -118,20 +118,6 @@ function own(x: unknown, key: string | number, where: string): unknown {
   if (typeof x === "object" && x !== null && Object.hasOwn(x, key))
     return (x as { readonly [key: string | number]: unknown })[key];
   throw new StudyError({ code: "missing", where, problem: `has no "${key}"` });
-}
-
-/** Linear between the depths of a profile; a depth outside is refused, not extrapolated. */
-export function readAlong({ depth, value }: Along<Kind>, at: number, where: string): number {
-  const i = depth.findIndex((d, k) => k > 0 && at <= d);
-  const [a, b, va, vb] = [depth[i - 1], depth[i], value[i - 1], value[i]];
-  if (a === undefined || b === undefined || va === undefined || vb === undefined || at < a)
-    throw new StudyError({
-      code: "outside",
-      where,
-      problem: `has no value at a depth of ${at} m`,
-      expected: `${depth[0] ?? "?"} m to ${depth.at(-1) ?? "?"} m`,
-    });
-  return va + ((vb - va) * (at - a)) / (b - a);
 }
 
 const malformed = (type: Type, where: string): StudyError =>

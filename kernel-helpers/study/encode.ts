@@ -1,5 +1,5 @@
 import { StudyError } from "../errors/index.js";
-import { entityTag, typeName, type Type } from "../method/index.js";
+import { entityTag, typeName, type Struct, type Type } from "../method/index.js";
 import { isKind } from "../units/index.js";
 import type { Node } from "./node.js";
 import { isRef } from "./wires.js";
@@ -47,7 +47,7 @@ export function encode(
       return { along: type.of, depth: [...depth], value: [...value] };
     }
     case "anyOf": {
-      const struct = type.among.find((s) => s.id === entityTag(x));
+      const struct = type.among.find((s) => s.id === entityTag(x)) ?? onlyFit(type.among, x);
       if (!struct) throw refused(type, x, where);
       return inner(struct, x, "");
     }
@@ -74,6 +74,20 @@ export function encode(
       };
     }
   }
+}
+
+/** The one struct whose fields an untagged object has, all required and none unknown. */
+function onlyFit(among: readonly Struct[], x: unknown): Struct | null {
+  if (typeof x !== "object" || x === null || entityTag(x) !== null) return null;
+  const fits = among.filter(
+    ({ fields }) =>
+      Object.keys(x).every((n) => Object.hasOwn(fields, n)) &&
+      Object.entries(fields).every(
+        ([n, f]) =>
+          Object.hasOwn(x, n) || (typeof f.kind !== "string" && f.kind.type === "optional"),
+      ),
+  );
+  return fits.length === 1 ? (fits[0] ?? null) : null;
 }
 
 const isNumbers = (x: unknown): x is number[] =>

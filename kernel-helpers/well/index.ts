@@ -1,0 +1,2 @@
+export * from "./bore-section.js";
+export * from "./well.js";
