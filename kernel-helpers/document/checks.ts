@@ -1,0 +1,53 @@
+import { isStated, type CheckItem, type Stated } from "../study/index.js";
+import { isKind } from "../units/index.js";
+import type { Context } from "./context.js";
+import { joined, showNumber } from "./show.js";
+import { formatNumber } from "../units/index.js";
+import type { CheckView, Link } from "./view.js";
+
+export function checkView(ctx: Context, item: CheckItem): CheckView {
+  const value = item.args["value"] ?? { absent: true as const };
+  const limit = item.args["limit"] ?? { absent: true as const };
+  const [x, y] = [ctx.resolver.resolve(value, item.of), ctx.resolver.resolve(limit, item.of)];
+  return {
+    kind: "check",
+    number: ctx.numbering.of(item.id),
+    anchor: ctx.numbering.anchor(item.id),
+    title: item.title,
+    value: joined(ctx.showResolved(x)),
+    sense: item.sense,
+    limit: joined(ctx.showResolved(y)),
+    valueFrom: ctx.from(value),
+    limitFrom: ctx.from(limit),
+    verdict:
+      "stop" in item.result ? "not evaluated" : item.result.value === "pass" ? "passes" : "fails",
+    margin: margin(ctx, item, "stop" in y ? null : y.value),
+    because: item.because,
+    assumptions: assumptionsUnder(ctx, item.id),
+  };
+}
+
+function margin(ctx: Context, item: CheckItem, limit: unknown): string {
+  if (item.margin === null || !isKind(item.of)) return "–";
+  // A margin is a difference: temperatures and absolute pressures have their own kind for that.
+  const kind =
+    item.of === "temperature"
+      ? "temperatureDifference"
+      : item.of === "pressure"
+        ? "pressureDifference"
+        : item.of;
+  const shown = joined(showNumber(kind, item.margin, ctx.system));
+  const share =
+    typeof limit === "number" && limit !== 0 && item.of !== "temperature"
+      ? ` (${formatNumber((100 * item.margin) / Math.abs(limit), 2)}\u00a0% of the limit)`
+      : "";
+  return shown + share;
+}
+
+export const assumptionsUnder = (ctx: Context, id: string): Link[] => grounds(ctx, id, "assumed");
+export const inputsUnder = (ctx: Context, id: string): Link[] => grounds(ctx, id, "given");
+const grounds = (ctx: Context, id: string, op: Stated["op"]): Link[] =>
+  ctx.lineage
+    .groundsOf(id)
+    .filter((g) => isStated(g) && g.op === op)
+    .map((g) => ctx.numbering.titled(g.id));

@@ -1,0 +1,163 @@
+import { isStated, type AppliedUse, type Item, type StudyRecord } from "../study/index.js";
+import { cautionsOf } from "./cautions.js";
+import { checkView } from "./checks.js";
+import { conclusionView } from "./conclusions.js";
+import { Context } from "./context.js";
+import type { Chart } from "./figures/chart.js";
+import { figureView } from "./figure.js";
+import { assumptionView, inputView } from "./inputs.js";
+import { methodView, modelView } from "./method-views.js";
+import { openItems } from "./open-items.js";
+import { comparisonView, formulaView, objectView, stepView } from "./steps.js";
+import { recordedTable } from "./tables.js";
+import type { Block, Link, PackageView, SectionView } from "./view.js";
+
+/** A record → everything a package shows, in its order. Plain data: a rendering adds no fact. */
+export function packageView(record: StudyRecord, charts: readonly Chart[]): PackageView {
+  const { body, run, hash } = record;
+  const { study } = body;
+  const ctx = new Context(body);
+  const open = openItems(ctx, record);
+  const blocking = open.filter((o) => o.blocksApproval).length;
+
+  const used = new Map<string, Link[]>();
+  for (const item of body.items)
+    if ("use" in item)
+      used.set(item.use, [...(used.get(item.use) ?? []), ctx.numbering.link(item.id)]);
+  const methods = body.declared.filter((d) => d.role === "method");
+  const models = body.declared.filter((d) => d.role === "model");
+  const numberOf = new Map([
+    ...methods.map((d, i) => [d.id, `M${i + 1}`] as const),
+    ...models.map((d, i) => [d.id, `P${i + 1}`] as const),
+  ]);
+  const citations = new Map(body.references.map((r, i) => [r.id, String(i + 1)]));
+  const throughModels = (id: string): Link[] =>
+    models
+      .filter((m) => m.uses.some((u) => u.id === id))
+      .map((m) => ({ text: numberOf.get(m.id) ?? m.id, to: `method-${m.id}` }));
+
+  const block = (item: Item): Block | null => {
+    switch (item.op) {
+      case "given":
+      case "assumed":
+      case "conclude":
+        return null;
+      case "step":
+        return stepView(ctx, item, numberOf.get(item.use) ?? "");
+      case "run":
+      case "entity":
+        return objectView(ctx, item, numberOf.get((item as AppliedUse).use) ?? null);
+      case "formula":
+        return formulaView(ctx, item);
+      case "compare":
+        return comparisonView(ctx, item);
+      case "check":
+        return checkView(ctx, item);
+      case "caution":
+        return { kind: "caution", anchor: ctx.numbering.anchor(item.id), text: item.text };
+      case "figure":
+        return figureView(ctx, item, charts);
+      case "table":
+        return recordedTable(ctx, item);
+    }
+  };
+  const blocksIn = (section: string | null): Block[] =>
+    body.items.filter((i) => i.section === section).flatMap((i) => block(i) ?? []);
+  const sections: SectionView[] = [
+    {
+      anchor: "section-opening",
+      title: "Before the sections",
+      about: null,
+      blocks: blocksIn(null),
+    },
+    ...body.sections.map((s) => ({
+      anchor: `section-${s.id}`,
+      title: s.title,
+      about: s.about,
+      blocks: blocksIn(s.id),
+    })),
+  ].filter((s) => s.blocks.length > 0 || s.about !== null);
+
+  return {
+    cover: {
+      title: study.title,
+      number: study.number,
+      revision: study.revision,
+      status: run.clean ? "For checking" : "Draft",
+      statusBecause: [
+        ...(run.clean ? [] : ["not from a clean run of the whole notebook"]),
+        ...(blocking > 0
+          ? [`${blocking} open item${blocking === 1 ? "" : "s"} must be closed before approval`]
+          : []),
+        "not signed",
+      ],
+      prepared: study.prepared,
+      checked: study.checked ?? "not yet",
+      approved: study.approved ?? "not yet",
+      disclaimer: study.disclaimer,
+    },
+    revisions: [{ revision: study.revision, what: "This issue.", hash: hash.slice(0, 16) }],
+    purpose: study.purpose,
+    decision: study.decision,
+    conclusions: body.items.flatMap((i) => (i.op === "conclude" ? [conclusionView(ctx, i)] : [])),
+    cautions: cautionsOf(ctx, body),
+    limits: body.items.flatMap((i) =>
+      "findings" in i
+        ? i.findings
+            .filter((f) => f.code !== "pass-the-reference")
+            .map((f) => ({ text: f.says, at: ctx.numbering.titled(i.id) }))
+        : [],
+    ),
+    inputs: body.items.flatMap((i) => (isStated(i) && i.op === "given" ? [inputView(ctx, i)] : [])),
+    assumptions: body.items.flatMap((i) =>
+      isStated(i) && i.op === "assumed" ? [assumptionView(ctx, i)] : [],
+    ),
+    methods: methods.map((m) =>
+      methodView(m, numberOf.get(m.id) ?? "", citations, [
+        ...(used.get(m.id) ?? []),
+        ...throughModels(m.id),
+      ]),
+    ),
+    models: models.map((m) =>
+      modelView(
+        ctx,
+        m,
+        numberOf.get(m.id) ?? "",
+        (id) => numberOf.get(id) ?? "",
+        used.get(m.id) ?? [],
+      ),
+    ),
+    sections,
+    comparisons: body.items.flatMap((i) => (i.op === "compare" ? [comparisonView(ctx, i)] : [])),
+    uncertainty: uncertaintyText(record),
+    open,
+    references: body.references.map((r) => ({
+      number: citations.get(r.id) ?? "",
+      anchor: `ref-${r.id}`,
+      id: r.id,
+    })),
+    software: [
+      ...Object.entries(run.versions).map(([name, value]) => ({ name, value })),
+      { name: "run at", value: run.at },
+      ...(run.notebook
+        ? [
+            { name: "notebook", value: run.notebook.name },
+            { name: "notebook SHA-256", value: run.notebook.sha256 },
+          ]
+        : []),
+      { name: "record schema", value: String(record.schema) },
+      { name: "record body SHA-256", value: hash },
+    ],
+    hash,
+  };
+}
+
+/** Says what was done about uncertainty, and what was not. */
+function uncertaintyText({ body }: StudyRecord): string {
+  const spreads = body.items.filter(
+    (i) => isStated(i) && i.form === "number" && i.spread !== null,
+  ).length;
+  return spreads === 0
+    ? "No spread was stated for any input, and none was propagated: the results are single values."
+    : `${spreads} input${spreads === 1 ? " has a stated spread" : "s have stated spreads"} (see Inputs and Assumptions). No spread was propagated to the results: they are single values at the stated inputs.`;
+}
