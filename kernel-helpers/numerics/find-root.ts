@@ -1,4 +1,5 @@
 import { InputError, SolveError } from "../errors/index.js";
+import { finiteAt } from "./finite-at.js";
 
 /** How close a root must be, and what it is called in a message. */
 export interface RootOptions {
@@ -35,10 +36,10 @@ export function findRoot(
 
   // The root lies between a, the newest point, and b; c is the point that was dropped last.
   let b = low;
-  let fb = finite(f(b), b, where);
+  let fb = finiteAt(f(b), b, where);
   if (fb === 0) return b;
   let a = high;
-  let fa = finite(f(a), a, where);
+  let fa = finiteAt(f(a), a, where);
   if (fa === 0) return a;
   if (fa > 0 === fb > 0) throw noBracket(low, fb, high, fa, where);
   const largest = Math.max(Math.abs(fa), Math.abs(fb));
@@ -46,7 +47,7 @@ export function findRoot(
 
   for (let i = 0; i < maxIterations; i++) {
     const x = a + part * (b - a);
-    const fx = finite(f(x), x, where);
+    const fx = finiteAt(f(x), x, where);
     if (fx === 0) return x;
     let c = a;
     let fc = fa;
@@ -95,16 +96,6 @@ function assertBracket(low: number, high: number, where: string): void {
     where,
     problem: `cannot be sought from ${low} to ${high}`,
     expected: "two finite ends, the lower first",
-  });
-}
-
-function finite(y: number, x: number, where: string): number {
-  if (Number.isFinite(y)) return y;
-  throw new SolveError({
-    code: "not-finite",
-    where,
-    problem: `the function is ${y} at ${x}`,
-    expected: "a finite value everywhere in the bracket",
   });
 }
 

@@ -1,15 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { findRoot } from "../../kernel-helpers/numerics/find-root.js";
-
-const codeOf = (act: () => unknown): string => {
-  try {
-    act();
-  } catch (error) {
-    return (error as { code: string }).code;
-  }
-  return "no error";
-};
+import { codeOf } from "../code-of.js";
 
 describe("findRoot against printed roots", () => {
   // Alefeld, Potra and Shi, ACM TOMS 21 (1995) 327: problems 1 to 4 of table 1.
