@@ -1,4 +1,4 @@
-import { assertTablePoints, intervalOf, type TablePoints } from "./table-points.js";
+import { assertTablePoints, intervalOf, placeWithin, type TablePoints } from "./table-points.js";
 
 /** A function known at points and straight between them. */
 export interface LinearTable {
@@ -16,8 +16,9 @@ export function linearTable(points: TablePoints): LinearTable {
   const x = [...points.x];
   const y = [...points.y];
   const { where } = points;
-  const at = (here: number): number => {
-    const i = intervalOf({ x, where }, here);
+  const at = (place: number): number => {
+    const here = placeWithin({ x, where }, place);
+    const i = intervalOf(x, here);
     return between(x[i] as number, y[i] as number, x[i + 1] as number, y[i + 1] as number, here);
   };
   return Object.assign(at, { low: x[0] as number, high: x[x.length - 1] as number });

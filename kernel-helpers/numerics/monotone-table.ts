@@ -1,5 +1,5 @@
 import { InputError } from "../errors/index.js";
-import { assertTablePoints, intervalOf, type TablePoints } from "./table-points.js";
+import { assertTablePoints, intervalOf, placeWithin, type TablePoints } from "./table-points.js";
 
 /** A smooth monotone function through points. */
 export interface MonotoneTable {
@@ -32,8 +32,9 @@ export function monotoneTable(points: TablePoints): MonotoneTable {
   assertMonotone(secant, where);
   const slopes = limited(parabolic(step, secant), secant);
 
-  const evaluate = (at: number, derivative: boolean): number => {
-    const i = intervalOf({ x, where }, at);
+  const evaluate = (place: number, derivative: boolean): number => {
+    const at = placeWithin({ x, where }, place);
+    const i = intervalOf(x, at);
     const h = step[i] as number;
     const t = (at - (x[i] as number)) / h;
     const d = secant[i] as number;

@@ -41,22 +41,30 @@ export function assertTablePoints({ x, y, where }: TablePoints): void {
   }
 }
 
-/** The index of the interval that holds a point; a point outside the table is refused. */
-export function intervalOf({ x, where }: Pick<TablePoints, "x" | "where">, at: number): number {
-  const last = x.length - 1;
+/**
+ * A place within the table. One outside by less than 1e-12 of its span, as the rounding of a grid
+ * leaves it, is the end; any other is refused.
+ */
+export function placeWithin({ x, where }: Pick<TablePoints, "x" | "where">, at: number): number {
   const low = x[0] as number;
-  const high = x[last] as number;
-  if (!(at >= low && at <= high)) {
-    throw new InputError({
-      code: "outside-table",
-      where,
-      problem: `is not known at ${at}`,
-      expected: `${low} to ${high}`,
-      remedy: "a table is not extrapolated: extend it from its source",
-    });
-  }
+  const high = x[x.length - 1] as number;
+  if (at >= low && at <= high) return at;
+  const slack = 1e-12 * (high - low);
+  if (at < low && at >= low - slack) return low;
+  if (at > high && at <= high + slack) return high;
+  throw new InputError({
+    code: "outside-table",
+    where,
+    problem: `is not known at ${at}`,
+    expected: `${low} to ${high}`,
+    remedy: "a table is not extrapolated: extend it from its source",
+  });
+}
+
+/** The index of the interval that holds a place within the table. */
+export function intervalOf(x: readonly number[], at: number): number {
   let left = 0;
-  let right = last;
+  let right = x.length - 1;
   while (right - left > 1) {
     const middle = (left + right) >> 1;
     if ((x[middle] as number) <= at) left = middle;

@@ -37,6 +37,11 @@ describe("linearTable", () => {
     y[1] = 99;
     expect(table(1)).toBe(2);
   });
+  it("takes the rounding of a grid at its ends", () => {
+    const table = linearTable({ x: [0, 0.3], y: [1, 2], where });
+    expect(table(0.1 + 0.2)).toBe(2);
+    expect(table(-1e-16)).toBe(1);
+  });
   it("refuses a place outside its points, naming the table and its range", () => {
     const table = linearTable({ x: [1, 2], y: [1, 2], where });
     expect(() => table(2.01)).toThrow(/z-factor: is not known at 2.01; expected 1 to 2/);
