@@ -75,7 +75,7 @@ export function stepView(ctx: Context, item: AppliedUse, methodNumber: string): 
 }
 
 export function formulaView(ctx: Context, item: Formula): StepView {
-  const formula = parseFormula(item.text);
+  const formula = parseFormula(item.text, Object.keys(item.kinds));
   const fields = Object.fromEntries(
     Object.entries(item.kinds).map(([n, kind]) => {
       const node = item.args[n];

@@ -4,6 +4,7 @@ export * from "./bound.js";
 export * from "./descriptors.js";
 export * from "./entity.js";
 export * from "./finding.js";
+export * from "./formula/index.js";
 export * from "./method.js";
 export * from "./model.js";
 export * from "./range-check.js";

@@ -59,6 +59,11 @@ export const packToCut = model({
         because: `a pack from ${base} m to the top of the well at ${well.top} m leaves more than the wanted share of the flow`,
       };
     const top = findRoot(surplus, well.top, base - 1e-6, { relative: DEPTH_TOLERANCE });
-    return packOutcome({ law, drive, clearRate, rest }, packColumn(place, top), grade.grainMass, look);
+    return packOutcome(
+      { law, drive, clearRate, rest },
+      packColumn(place, top),
+      grade.grainMass,
+      look,
+    );
   },
 });

@@ -17,7 +17,7 @@ export function formulaUse(
   args: { readonly [name: string]: Kind },
   kind: Kind,
 ): Use {
-  const formula = parseFormula(text);
+  const formula = parseFormula(text, Object.keys(args));
   const missing = formula.names.find((n) => !Object.hasOwn(args, n));
   if (missing !== undefined)
     throw new StudyError({

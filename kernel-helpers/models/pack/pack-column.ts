@@ -92,7 +92,11 @@ export const packMass = ({ pieces, rhoS }: PackColumn): number =>
  * Σ(w−G)L from the free top down, as a share of the weight above. Wall friction gets no credit:
  * without a cap a cohesionless pack unravels from its top. Negative where it lifts.
  */
-export function holdMargin(law: PackLaw, column: PackColumn, q: number): { margin: number; depth: number } {
+export function holdMargin(
+  law: PackLaw,
+  column: PackColumn,
+  q: number,
+): { margin: number; depth: number } {
   let stress = 0;
   let weight = 0;
   let least = { margin: Infinity, depth: column.pieces[0]?.top ?? 0 };

@@ -13,7 +13,9 @@ import {
 import type { packResults } from "./pack-results.js";
 import { restLoss, shareAt, type RestLaw } from "./rest-of-path.js";
 
-type Results = Plains<{ readonly [N in keyof typeof packResults]: (typeof packResults)[N]["kind"] }>;
+type Results = Plains<{
+  readonly [N in keyof typeof packResults]: (typeof packResults)[N]["kind"];
+}>;
 export interface Driven {
   readonly law: PackLaw;
   readonly drive: number;
@@ -33,7 +35,12 @@ export const restingRate = ({ law, drive, clearRate, rest }: Driven, column: Pac
   );
 
 /** Everything told of a pack in place, with its range findings. */
-export function packOutcome(driven: Driven, column: PackColumn, grainMass: number, look: Look): Results {
+export function packOutcome(
+  driven: Driven,
+  column: PackColumn,
+  grainMass: number,
+  look: Look,
+): Results {
   const { law, drive, clearRate, rest } = driven;
   const { pieces, d, rhoS } = column;
   const resting = restingRate(driven, column);
@@ -42,7 +49,11 @@ export function packOutcome(driven: Driven, column: PackColumn, grainMass: numbe
   const state = margin >= 0 ? "rests" : "lifts";
   const rate = state === "rests" ? resting : lifted;
   for (const p of pieces) {
-    look(packLaws[law], { u: resting / p.area, d, eps: p.eps, rho: p.rho, mu: p.mu, D: p.bore }, p.base);
+    look(
+      packLaws[law],
+      { u: resting / p.area, d, eps: p.eps, rho: p.rho, mu: p.mu, D: p.bore },
+      p.base,
+    );
     look(packWeightGradient, { eps: p.eps, rho: p.rho, rhoS, theta: p.theta }, p.base);
     look(dixonSpheres, { d, D: p.bore }, p.base);
   }
@@ -84,8 +95,14 @@ function liftRate(law: PackLaw, column: PackColumn, scale: number): number {
   return findRoot(held, 0, high, { relative: RATE_TOLERANCE });
 }
 
-function parts(column: PackColumn, gradients: readonly number[], weights: readonly number[], q: number): Results["parts"] {
-  const out: { -readonly [N in keyof Results["parts"][number]]: Results["parts"][number][N] }[] = [];
+function parts(
+  column: PackColumn,
+  gradients: readonly number[],
+  weights: readonly number[],
+  q: number,
+): Results["parts"] {
+  const out: { -readonly [N in keyof Results["parts"][number]]: Results["parts"][number][N] }[] =
+    [];
   column.pieces.forEach((p, i) => {
     const last = out.at(-1);
     if (last?.name === p.name && last.base === p.top) {
@@ -106,7 +123,10 @@ function parts(column: PackColumn, gradients: readonly number[], weights: readon
 }
 
 /** A value per piece as a profile with steps at the joints. */
-const along = ({ pieces }: PackColumn, values: readonly number[]): { depth: number[]; value: number[] } => ({
+const along = (
+  { pieces }: PackColumn,
+  values: readonly number[],
+): { depth: number[]; value: number[] } => ({
   depth: pieces.flatMap((p) => [p.top, p.base]),
   value: values.flatMap((v) => [v, v]),
 });
