@@ -1,0 +1,3 @@
+export { fontCss } from "./font-css.js";
+export { fontStacks } from "./font-stacks.js";
+export { mathCss } from "./math-css.js";

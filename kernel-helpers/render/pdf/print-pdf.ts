@@ -1,0 +1,148 @@
+import { InputError, RenderError } from "../../errors/index.js";
+import type { BrowserKind, BrowserSession, LockedPage } from "../browser/index.js";
+import { anchorPages } from "./anchor-pages.js";
+import { pdfFacts } from "./read-pdf.js";
+
+export interface PdfInfo {
+  readonly title: string;
+  readonly author: string;
+  readonly subject: string;
+  readonly keywords?: readonly string[];
+  /** The date the file states, whenever it is printed: the same HTML gives the same bytes. */
+  readonly created: Date;
+}
+
+export interface PrintedPdf {
+  readonly bytes: Uint8Array;
+  readonly pages: number;
+  /** How often it was printed until the page numbers in it were true. */
+  readonly passes: number;
+  /** The addresses it asked for and was refused; empty for a page that holds all it needs. */
+  readonly blocked: readonly string[];
+  readonly browser: { readonly kind: BrowserKind; readonly version: string };
+}
+
+const maxPasses = 4;
+
+/**
+ * Prints self-contained HTML as a tagged PDF with an outline, on the sheet its `@page` rule names.
+ * In each `<span data-page-of="id"></span>` the number of the page on which that element begins is
+ * put; a link to the element must stand somewhere in the HTML.
+ *
+ * @throws RenderError `no-text`, `unembedded-font`, `no-anchor`, `unsettled-pages`; InputError for a bad date.
+ */
+export async function printPdf({
+  html,
+  session,
+  info,
+}: {
+  html: string;
+  session: BrowserSession;
+  info: PdfInfo;
+}): Promise<PrintedPdf> {
+  if (Number.isNaN(info.created.getTime()))
+    throw new InputError({
+      code: "bad-date",
+      where: "info.created",
+      problem: "is not a date",
+      expected: "a valid Date",
+    });
+  return session.withPage(html, async (page) => {
+    const { raw, passes } = await printSettled(page);
+    const { bytes, pages } = await finish(raw, info);
+    return {
+      bytes,
+      pages,
+      passes,
+      blocked: [...page.blocked],
+      browser: { kind: session.browser.kind, version: session.version },
+    };
+  });
+}
+
+// `document.querySelectorAll` itself can be hidden by an element of that name in the page.
+const spans = `Array.from(Document.prototype.querySelectorAll.call(document, "[data-page-of]"))`;
+
+async function printSettled(page: LockedPage): Promise<{ raw: Uint8Array; passes: number }> {
+  const wanted = await page.evaluate(`${spans}.map((e) => String(e.getAttribute("data-page-of")))`);
+  if (!isListOfText(wanted) || wanted.length === 0)
+    return { raw: await page.pdf({ isTagged: true }), passes: 1 };
+  // Tags take as long as the rest and do not move anything, so the first pass goes without.
+  let numbers = await pagesOf(wanted, await page.pdf({ isTagged: false }));
+  for (let passes = 2; passes <= maxPasses; passes++) {
+    await page.evaluate(
+      `((numbers) => ${spans}.forEach((e, i) => { e.textContent = numbers[i]; }))(${JSON.stringify(numbers)})`,
+    );
+    const raw = await page.pdf({ isTagged: true });
+    const now = await pagesOf(wanted, raw);
+    if (now.every((n, i) => n === numbers[i])) return { raw, passes };
+    numbers = now;
+  }
+  throw new RenderError({
+    code: "unsettled-pages",
+    where: "table of contents",
+    problem: `its page numbers still move after ${maxPasses} passes`,
+    remedy: "give the numbers a fixed width, so that they do not move the text",
+  });
+}
+
+async function pagesOf(ids: readonly string[], pdf: Uint8Array): Promise<readonly string[]> {
+  const { PDFDocument } = await import("pdf-lib");
+  const pages = await anchorPages(await PDFDocument.load(pdf, { updateMetadata: false }));
+  return ids.map((id) => {
+    const page = pages.get(id);
+    if (page !== undefined) return String(page);
+    throw new RenderError({
+      code: "no-anchor",
+      where: `data-page-of="${id}"`,
+      problem: "has no printed element of that id that a link points at",
+      remedy: `give an element id="${id}" and link to it`,
+    });
+  });
+}
+
+/** Sets what the file says of itself, packs its objects (a third of the size) and checks its text. */
+async function finish(
+  raw: Uint8Array,
+  info: PdfInfo,
+): Promise<{ bytes: Uint8Array; pages: number }> {
+  const { PDFDocument } = await import("pdf-lib");
+  const pdf = await PDFDocument.load(raw, {
+    updateMetadata: false,
+    parseSpeed: Number.POSITIVE_INFINITY,
+  });
+  const { fonts, pages } = await pdfFacts(pdf);
+  if (fonts.length === 0)
+    throw new RenderError({
+      code: "no-text",
+      where: "PDF",
+      problem: `${pages} pages were printed without a single letter`,
+      expected: "text",
+      remedy: "embed the fonts in the HTML, or install some on this system",
+    });
+  const loose = fonts.find((font) => !font.isEmbedded);
+  if (loose)
+    throw new RenderError({
+      code: "unembedded-font",
+      where: `font ${loose.name}`,
+      problem: "is not in the file, which would look otherwise on another machine",
+    });
+  pdf.setTitle(info.title, { showInWindowTitleBar: true });
+  pdf.setAuthor(info.author);
+  pdf.setSubject(info.subject);
+  pdf.setKeywords([...(info.keywords ?? [])]);
+  pdf.setProducer("Stillwell");
+  pdf.setCreator("Stillwell");
+  pdf.setCreationDate(info.created);
+  pdf.setModificationDate(info.created);
+  const bytes = await pdf.save({
+    useObjectStreams: true,
+    addDefaultPage: false,
+    updateFieldAppearances: false,
+    objectsPerTick: Number.POSITIVE_INFINITY,
+  });
+  return { bytes, pages };
+}
+
+const isListOfText = (value: unknown): value is readonly string[] =>
+  Array.isArray(value) && value.every((item) => typeof item === "string");
