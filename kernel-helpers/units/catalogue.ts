@@ -168,6 +168,7 @@ export const usGalpday = unit({
   source: NIST,
 });
 
+export const Sm3ps = unit({ kind: "standardLiquidRate", symbol: "Sm³/s", scale: 1, source: SI });
 export const Sm3pday = unit({
   kind: "standardLiquidRate",
   symbol: "Sm³/d",
@@ -180,16 +181,31 @@ export const STBpday = unit({
   scale: BARREL / DAY,
   source: NIST,
 });
+export const gasSm3ps = unit({ kind: "standardGasRate", symbol: "Sm³/s", scale: 1, source: SI });
+export const gasSm3pday = unit({
+  kind: "standardGasRate",
+  symbol: "Sm³/d",
+  scale: 1 / DAY,
+  source: SI,
+});
 export const scfpday = unit({
   kind: "standardGasRate",
   symbol: "scf/d",
   scale: FT ** 3 / DAY,
   source: NIST,
 });
+// MM is a million, as the trade writes it.
+export const MMscfpday = unit({
+  kind: "standardGasRate",
+  symbol: "MMscf/d",
+  scale: (1e6 * FT ** 3) / DAY,
+  source: NIST,
+});
 
 export const kgps = unit({ kind: "massRate", symbol: "kg/s", scale: 1, source: SI });
 export const lbmpmin = unit({ kind: "massRate", symbol: "lbm/min", scale: LB / 60, source: NIST });
 
+export const m2Permeability = unit({ kind: "permeability", symbol: "m²", scale: 1, source: SI });
 // darcy = 1 cP x 1 cm/s per 1 atm/cm, exactly 1/101325 cm2 x 1e-3
 export const mD = unit({
   kind: "permeability",

@@ -36,6 +36,7 @@ const si: Partial<Record<Kind, Ladder>> = {
   temperature: one(c.degC),
   flowRate: one(c.m3pday),
   standardLiquidRate: one(c.Sm3pday),
+  standardGasRate: one(c.gasSm3pday),
   permeability: one(c.mD),
 };
 const field: Partial<Record<Kind, Ladder>> = {
@@ -63,6 +64,10 @@ const field: Partial<Record<Kind, Ladder>> = {
   temperatureDifference: one(c.deltaF),
   flowRate: one(c.bblpday),
   standardLiquidRate: one(c.STBpday),
+  standardGasRate: [
+    { unit: c.MMscfpday, from: 0.1 * c.MMscfpday.scale },
+    { unit: c.scfpday, from: 0 },
+  ],
   massRate: one(c.lbmpmin),
   permeability: one(c.mD),
 };

@@ -31,7 +31,8 @@ export function unit<K extends Kind>(parts: UnitParts<K>): Unit<K> {
   const { kind, symbol, scale, offset = 0, source } = parts;
   const make = (x: number | string): Quantity<K> => {
     const typed = typeof x === "string" ? parseMixedNumber(x) : x;
-    if (typeof typed !== "number" || !Number.isFinite(typed)) {
+    const si = typeof typed === "number" ? typed * scale + offset : NaN;
+    if (!Number.isFinite(si)) {
       throw new InputError({
         code: "not-a-number",
         where: symbol,
@@ -39,7 +40,7 @@ export function unit<K extends Kind>(parts: UnitParts<K>): Unit<K> {
         expected: 'a finite number, or a text such as "9 5/8"',
       });
     }
-    return (typed * scale + offset) as Quantity<K>;
+    return si as Quantity<K>;
   };
   return Object.assign(make, { kind, symbol, scale, offset, source });
 }
