@@ -1,0 +1,74 @@
+import { method } from "../../method/index.js";
+import { m } from "../../units/index.js";
+import {
+  bedVoidage,
+  fittingRatio,
+  lambda,
+  lambdaNote,
+  sphereBedFamily,
+  sphereBedInputs,
+} from "./voidage-inputs.js";
+
+/**
+ * Mean voidage of equal spheres shaken or vibrated into a bore (dense random packing).
+ *
+ * λ = d/D: ε = 0.372 + 0.002 (exp(15.306 λ) − 1) to λ = 0.253; 0.681 − 1.363λ + 2.241λ² to 0.538;
+ * 1 − 0.667λ³/√(2λ−1) above (zigzag). d sphere, D bore [m]. The branches meet within 0.015. Throws
+ * InputError for d > D. Zou and Yu (1995).
+ */
+export const zouYuDense = method({
+  id: "zou-yu-dense-1995",
+  revision: 1,
+  family: sphereBedFamily,
+  title: "Voidage of a dense bed of spheres (Zou and Yu)",
+  tex: String.raw`\begin{cases}0.372+0.002\left(e^{15.306\lambda}-1\right)&\lambda\le0.253\\0.681-1.363\lambda+2.241\lambda^2&\lambda\le0.538\\1-0.667\,\lambda^3(2\lambda-1)^{-0.5}&\lambda>0.538\end{cases}\quad\lambda=\frac dD`,
+  source: { cite: "zou1995", where: "dense packing" },
+  inputs: sphereBedInputs,
+  within: { lambda: { of: lambda, range: [0, 1], stated: true, note: lambdaNote } },
+  output: bedVoidage,
+  compute: (a) => {
+    const k = fittingRatio("zou-yu-dense-1995", a);
+    if (k <= 0.253) return 0.372 + 0.002 * (Math.exp(15.306 * k) - 1);
+    if (k <= 0.538) return 0.681 - 1.363 * k + 2.241 * k ** 2;
+    return 1 - 0.667 * k ** 3 * (2 * k - 1) ** -0.5;
+  },
+  checks: [
+    {
+      from: { cite: "derivation", where: "one sphere of the bore's diameter upon another: 1/3" },
+      basis: "exact limit or identity",
+      rows: [
+        {
+          given: { d: m(1), D: m(1) },
+          printed: "0.3333",
+          within: 1.2e-3,
+          because: "the source rounds 2/3 to 0.667",
+        },
+        {
+          given: { d: m(0.8), D: m(1) },
+          printed: "0.55934",
+          within: 5e-4,
+          because: "exact zigzag 1 − (2/3)λ³/√(2λ−1); the source rounds 2/3 to 0.667",
+        },
+      ],
+    },
+    {
+      from: { cite: "scott1960", where: "random dense packing of spheres, wide bore: 0.37" },
+      basis: "from memory",
+      rows: [
+        {
+          given: { d: m(1e-9), D: m(1) },
+          printed: "0.37",
+        },
+      ],
+    },
+    {
+      from: { cite: "zou1995", where: "equations evaluated apart from this program" },
+      basis: "from memory",
+      rows: [
+        { given: { d: m(0.1), D: m(1) }, printed: "0.37924" },
+        { given: { d: m(0.3), D: m(1) }, printed: "0.47379" },
+        { given: { d: m(0.5), D: m(1) }, printed: "0.55975" },
+      ],
+    },
+  ],
+});
