@@ -2,7 +2,7 @@ import type { CheckItem, Conclusion } from "../study/index.js";
 import { assumptionsUnder, checkView, inputsUnder } from "./checks.js";
 import type { Context } from "./context.js";
 import { joined } from "./show.js";
-import type { ConclusionView, Run } from "./view.js";
+import type { ConclusionView, TextRun } from "./view.js";
 
 export function conclusionView(ctx: Context, item: Conclusion): ConclusionView {
   const checks = item.checks.map((id) => checkView(ctx, ctx.resolver.item(id) as CheckItem));
@@ -11,7 +11,7 @@ export function conclusionView(ctx: Context, item: Conclusion): ConclusionView {
     number: ctx.numbering.of(item.id),
     anchor: ctx.numbering.anchor(item.id),
     title: item.title,
-    sentence: item.parts.map((p): Run => {
+    sentence: item.parts.map((p): TextRun => {
       if (typeof p === "string") return { text: p, to: null, strong: false };
       const r = ctx.resolver.resolve(p.node, "dimensionless");
       return {

@@ -2,7 +2,7 @@ import { formulaToTex, parseFormula } from "../method/formula/index.js";
 import type {
   AppliedUse,
   Comparison,
-  Formula,
+  FormulaItem,
   Item,
   PlainJson,
   Result,
@@ -19,7 +19,7 @@ import type { ComparisonView, ObjectView, Row, StepView, TableView } from "./vie
 
 const stopText = (result: Result): string | null =>
   "stop" in result ? `No value (${sayStop(result.stop)}): ${result.because}.` : null;
-const says = (item: AppliedUse | Formula): string[] => item.findings.map((f) => f.says);
+const says = (item: AppliedUse | FormulaItem): string[] => item.findings.map((f) => f.says);
 
 function resultRow(ctx: Context, item: Item, symbol: string | null, meaning: string): Row | null {
   const r = ctx.resolver.ofItem(item);
@@ -28,7 +28,7 @@ function resultRow(ctx: Context, item: Item, symbol: string | null, meaning: str
 /** What equations show: the coherent SI numbers of the arguments that have a symbol. */
 function numbersFor(
   ctx: Context,
-  item: AppliedUse | Formula,
+  item: AppliedUse | FormulaItem,
   symbols: ReadonlyMap<string, string>,
 ): Map<string, string> {
   const out = new Map<string, string>();
@@ -74,7 +74,7 @@ export function stepView(ctx: Context, item: AppliedUse, methodNumber: string): 
   };
 }
 
-export function formulaView(ctx: Context, item: Formula): StepView {
+export function formulaView(ctx: Context, item: FormulaItem): StepView {
   const formula = parseFormula(item.text, Object.keys(item.kinds));
   const fields = Object.fromEntries(
     Object.entries(item.kinds).map(([n, kind]) => {

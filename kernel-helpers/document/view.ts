@@ -6,7 +6,7 @@ export interface Link {
   readonly to: string;
 }
 /** Running text with links in it. */
-export type Run = { readonly text: string; readonly to: string | null; readonly strong: boolean };
+export type TextRun = { readonly text: string; readonly to: string | null; readonly strong: boolean };
 
 export interface Row {
   readonly symbol: string | null;
@@ -54,7 +54,7 @@ export interface ConclusionView {
   readonly number: string;
   readonly anchor: string;
   readonly title: string;
-  readonly sentence: readonly Run[];
+  readonly sentence: readonly TextRun[];
   readonly standing: string;
   readonly stands: boolean;
   readonly checks: readonly CheckView[];
@@ -134,6 +134,8 @@ export interface DepthDrawing {
   }[];
   readonly pack: { readonly top: number; readonly base: number } | null;
   readonly xTitle: string;
+  /** Unit of all series. */
+  readonly unit: string;
   readonly series: readonly Series[];
   readonly marks: readonly { readonly depth: number; readonly label: string }[];
 }

@@ -17,6 +17,9 @@ export interface Look {
   diagnose(name: string, value: number | string): void;
 }
 
+/** Keeps the compiler from inferring a shape from what `solve` returns: the declared results rule. */
+type Settled<T> = [T][T extends unknown ? 0 : never];
+
 export interface ModelParts<I extends string, S extends Shape, R extends Shape> {
   readonly id: I;
   readonly revision: number;
@@ -29,7 +32,7 @@ export interface ModelParts<I extends string, S extends Shape, R extends Shape> 
   readonly inputs: Fields<S>;
   readonly results: Fields<R>;
   readonly cautions?: readonly string[];
-  readonly solve: (args: Values<S>, look: Look) => Plains<R> | Stop;
+  readonly solve: (args: Values<S>, look: Look) => Plains<Settled<R>> | Stop;
 }
 
 export interface Explained<R extends Shape> {

@@ -71,7 +71,7 @@ export interface AppliedUse extends Applied {
   readonly revision: number;
   readonly diagnostics: { readonly [name: string]: number | string };
 }
-export interface Formula extends Applied {
+export interface FormulaItem extends Applied {
   readonly op: "formula";
   readonly text: string;
   readonly kinds: { readonly [name: string]: Kind };
@@ -121,7 +121,7 @@ export interface TableItem extends Common {
 }
 
 export type Stated = StatedNumber | StatedChoice | StatedObject;
-export type Computed = AppliedUse | Formula | Comparison | CheckItem;
+export type Computed = AppliedUse | FormulaItem | Comparison | CheckItem;
 export type Item = Stated | Computed | Conclusion | Caution | Figure | TableItem;
 export type WithResult = Stated | Computed;
 

@@ -1,0 +1,12 @@
+import type { Struct, Use } from "../method/index.js";
+import { FallingBody, Grade, Liquid, Rod, SolidMaterial, Sphere } from "../materials/index.js";
+import { methods } from "../physics/index.js";
+import { BoreSection, Well } from "../well/index.js";
+import { models } from "./registry.js";
+
+/** Everything a record of this version can have used. */
+export const standardRegistry: readonly (Use | Struct)[] = [
+  ...(methods as unknown as readonly Use[]),
+  ...(models as unknown as readonly Use[]),
+  ...([Liquid, SolidMaterial, Sphere, Rod, FallingBody, Grade, BoreSection, Well] as unknown as readonly Struct[]),
+];

@@ -1,0 +1,2 @@
+export * from "./render-html.js";
+export * from "./write-package.js";
