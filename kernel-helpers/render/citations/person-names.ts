@@ -26,6 +26,6 @@ function personName(author: Author): string {
 
 /** "Sabri" becomes "S."; a particle such as "van" stays. */
 const initial = (name: string): string => {
-  const [first = ""] = [...name];
+  const first = Array.from(name)[0] ?? "";
   return first === first.toUpperCase() ? `${first}.` : name;
 };

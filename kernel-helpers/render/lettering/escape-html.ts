@@ -11,5 +11,4 @@ export const escapeHtml = (text: string): string =>
   text.replace(/[&<>"']/g, (c) => entities[c] ?? c).replace(forbiddenInXml, "\ufffd");
 
 // Characters that an SVG file may not hold even when escaped.
-// eslint-disable-next-line no-control-regex
 const forbiddenInXml = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]/g;

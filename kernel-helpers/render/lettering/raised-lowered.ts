@@ -27,4 +27,4 @@ export function raisedLowered(
 }
 
 const swap = (text: string, from: string, to: string): string =>
-  [...text].map((c) => to.charAt(from.indexOf(c))).join("");
+  Array.from(text, (c) => to.charAt(from.indexOf(c))).join("");

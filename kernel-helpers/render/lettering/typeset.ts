@@ -14,11 +14,14 @@ export const typesetHtml = (text: string): string =>
     .join("");
 
 /** Text as the content of an SVG `<text>`, raised and lowered characters as smaller, shifted spans. */
-export const typesetSvg = (text: string): string =>
-  raisedLowered(text)
+export const typesetSvg = (text: string): string => raiseInSvg(escapeHtml(text));
+
+/** The same for content that is escaped already. */
+export const raiseInSvg = (content: string): string =>
+  raisedLowered(content)
     .map((part) =>
       part.set === "plain"
-        ? escapeHtml(part.text)
-        : `<tspan baseline-shift="${part.set === "raised" ? "33%" : "-18%"}" font-size="72%">${escapeHtml(part.text)}</tspan>`,
+        ? part.text
+        : `<tspan baseline-shift="${part.set === "raised" ? "33%" : "-18%"}" font-size="72%">${part.text}</tspan>`,
     )
     .join("");

@@ -1,0 +1,2 @@
+export { escapeHtml } from "./escape-html.js";
+export { typesetHtml, typesetSvg } from "./typeset.js";
