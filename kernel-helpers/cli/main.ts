@@ -25,14 +25,19 @@ export async function main(argv: readonly string[]): Promise<number> {
   process.on("SIGTERM", onSignal);
   let code = 0;
   const program = new Command("stillwell")
-    .description("Calculations for source control of a well: run notebooks, write calculation packages, replay records.")
+    .description(
+      "Calculations for source control of a well: run notebooks, write calculation packages, replay records.",
+    )
     .version(stillwellVersion)
     .exitOverride()
     .showSuggestionAfterError()
     .configureOutput({ writeErr: (text) => process.stderr.write(text) });
-  const out = () => new Option("-o, --out <folder>", "where records and packages are written").default("out");
+  const out = () =>
+    new Option("-o, --out <folder>", "where records and packages are written").default("out");
   const limit = () =>
-    new Option("--cell-timeout <seconds>", "the longest that one cell may run").argParser(seconds).default(null, "no limit");
+    new Option("--cell-timeout <seconds>", "the longest that one cell may run")
+      .argParser(seconds)
+      .default(null, "no limit");
   program
     .command("run")
     .description("run a notebook headless and write its record")
@@ -48,7 +53,9 @@ export async function main(argv: readonly string[]): Promise<number> {
     .argument("<source>", "a record.json or an .ipynb file")
     .addOption(out())
     .addOption(limit())
-    .addOption(new Option("--paper <size>", "paper of the PDF").choices(["A4", "Letter"]).default("A4"))
+    .addOption(
+      new Option("--paper <size>", "paper of the PDF").choices(["A4", "Letter"]).default("A4"),
+    )
     .option("--no-pdf", "write the HTML only")
     .action(async (source: string, options: PackageOptions) => {
       code = await makePackage(source, options, context);

@@ -35,14 +35,17 @@ export async function recordNotebook(parts: RecordParts): Promise<readonly Recor
     output,
     cellTimeoutMs: cellTimeoutSeconds === null ? null : cellTimeoutSeconds * 1000,
     signal,
-    onProgress: ({ index, of, firstLine }) => terminal.progress(`  cell ${index} of ${of}: ${firstLine.slice(0, 60)}`),
+    onProgress: ({ index, of, firstLine }) =>
+      terminal.progress(`  cell ${index} of ${of}: ${firstLine.slice(0, 60)}`),
   });
   terminal.settle();
   if (outcome.status !== "ok") {
     terminal.err(describeFailure(outcome));
     return null;
   }
-  terminal.err(`  ${outcome.cellsRun} cells in ${(outcome.ms / 1000).toFixed(1)} s; with outputs: ${output}`);
+  terminal.err(
+    `  ${outcome.cellsRun} cells in ${(outcome.ms / 1000).toFixed(1)} s; with outputs: ${output}`,
+  );
   if (outcome.drafts.size === 0)
     throw new NotebookError({
       code: "no-study",

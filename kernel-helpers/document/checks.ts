@@ -8,15 +8,15 @@ import type { CheckView, Link } from "./view.js";
 export function checkView(ctx: Context, item: CheckItem): CheckView {
   const value = item.args["value"] ?? { absent: true as const };
   const limit = item.args["limit"] ?? { absent: true as const };
-  const [x, y] = [ctx.resolver.resolve(value, item.of), ctx.resolver.resolve(limit, item.of)];
+  const y = ctx.resolver.resolve(limit, item.of);
   return {
     kind: "check",
     number: ctx.numbering.of(item.id),
     anchor: ctx.numbering.anchor(item.id),
     title: item.title,
-    value: joined(ctx.showResolved(x)),
+    value: joined(ctx.showNode(value, item.of)),
     sense: item.sense,
-    limit: joined(ctx.showResolved(y)),
+    limit: joined(ctx.showNode(limit, item.of)),
     valueFrom: ctx.from(value),
     limitFrom: ctx.from(limit),
     verdict:

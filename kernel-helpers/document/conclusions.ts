@@ -13,9 +13,8 @@ export function conclusionView(ctx: Context, item: Conclusion): ConclusionView {
     title: item.title,
     sentence: item.parts.map((p): TextRun => {
       if (typeof p === "string") return { text: p, to: null, strong: false };
-      const r = ctx.resolver.resolve(p.node, "dimensionless");
       return {
-        text: verdictWords(joined(ctx.showResolved(r, p.unit))),
+        text: verdictWords(joined(ctx.showNode(p.node, "dimensionless", p.unit))),
         to: ctx.from(p.node)?.to ?? null,
         strong: true,
       };

@@ -1,5 +1,12 @@
-import { lineage, type Body, type Lineage, type Node, type TypeJson } from "../study/index.js";
-import { isKind, type DisplaySystem } from "../units/index.js";
+import {
+  isStated,
+  lineage,
+  type Body,
+  type Lineage,
+  type Node,
+  type TypeJson,
+} from "../study/index.js";
+import { formatTyped, isKind, type DisplaySystem } from "../units/index.js";
 import { Numbering } from "./numbering.js";
 import { Resolver, type Known, type Resolved } from "./resolve.js";
 import { joined, showValue, type ShownValue } from "./show.js";
@@ -23,6 +30,13 @@ export class Context {
   }
   showResolved(r: Resolved, unit?: string | null): ShownValue {
     return "stop" in r ? { text: `no value (${sayStop(r.stop)})`, unit: "" } : this.show(r, unit);
+  }
+  /** A node as the reader sees it: a stated number it points at directly is shown as it was typed. */
+  showNode(node: Node, type: TypeJson, unit?: string | null): ShownValue {
+    const item = "ref" in node && node.path.length === 0 ? this.resolver.item(node.ref) : null;
+    if (item && isStated(item) && item.form === "number" && !unit)
+      return { text: formatTyped(item.typed), unit: item.unit === "1" ? "" : item.unit };
+    return this.showResolved(this.resolver.resolve(node, type), unit);
   }
   /** The item a node points at, named with the part that is read. */
   from(node: Node): Link | null {
@@ -65,24 +79,29 @@ export class Context {
           if ("fields" in n) return this.rows(n.fields, this.resolver.fieldsOf(n.of), `${title}: `);
           const each =
             !isKind(field.type) && field.type.type === "list" ? field.type.each : field.type;
-          return [this.row(null, title, this.resolver.resolve(n, each), this.from(n))];
+          return [
+            { symbol: null, meaning: title, ...split(this.showNode(n, each)), from: this.from(n) },
+          ];
         });
       return [
-        this.row(field.symbol, meaning, this.resolver.resolve(node, field.type), this.from(node)),
+        {
+          symbol: field.symbol,
+          meaning,
+          ...split(this.showNode(node, field.type)),
+          from: this.from(node),
+        },
       ];
     });
   }
-  row(
-    symbol: string | null,
-    meaning: string,
-    r: Resolved,
-    from: Link | null,
-    unit?: string | null,
-  ): Row {
-    const { text, unit: shownUnit } = this.showResolved(r, unit);
-    return { symbol, meaning, value: text, unit: shownUnit, from };
+  row(symbol: string | null, meaning: string, r: Resolved): Row {
+    return { symbol, meaning, ...split(this.showResolved(r)), from: null };
   }
 }
+
+export const split = ({ text, unit }: ShownValue): { value: string; unit: string } => ({
+  value: text,
+  unit,
+});
 
 /** `densityAlong` → "density along", `no-flow` → "no flow". */
 export const words = (name: string): string =>

@@ -10,7 +10,7 @@ import type {
 } from "../study/index.js";
 import { isKind, kinds, type Kind } from "../units/index.js";
 import { formatNumber } from "../units/index.js";
-import { sayStop, words, type Context } from "./context.js";
+import { sayStop, split, words, type Context } from "./context.js";
 
 import { tableOfList } from "./tables.js";
 import { putIn } from "./tex-put-in.js";
@@ -23,7 +23,7 @@ const says = (item: AppliedUse | FormulaItem): string[] => item.findings.map((f)
 
 function resultRow(ctx: Context, item: Item, symbol: string | null, meaning: string): Row | null {
   const r = ctx.resolver.ofItem(item);
-  return "stop" in r ? null : ctx.row(symbol, meaning, r, null);
+  return "stop" in r ? null : ctx.row(symbol, meaning, r);
 }
 /** What equations show: the coherent SI numbers of the arguments that have a symbol. */
 function numbersFor(
@@ -145,9 +145,7 @@ export function objectView(
           }),
         );
       else
-        results.push(
-          ctx.row(field.symbol, field.note || words(name), { type: field.type, value }, null),
-        );
+        results.push(ctx.row(field.symbol, field.note || words(name), { type: field.type, value }));
     }
   }
   return {
@@ -177,7 +175,12 @@ export function comparisonView(ctx: Context, item: Comparison): ComparisonView {
   const side = (name: "main" | "alternate"): Row => {
     const node = item.args[name] ?? { absent: true as const };
     const title = "ref" in node ? ctx.resolver.item(node.ref).title : name;
-    return ctx.row(null, title, ctx.resolver.resolve(node, item.of), ctx.from(node));
+    return {
+      symbol: null,
+      meaning: title,
+      ...split(ctx.showNode(node, item.of)),
+      from: ctx.from(node),
+    };
   };
   const { result } = item;
   return {

@@ -6,7 +6,11 @@ export interface Link {
   readonly to: string;
 }
 /** Running text with links in it. */
-export type TextRun = { readonly text: string; readonly to: string | null; readonly strong: boolean };
+export type TextRun = {
+  readonly text: string;
+  readonly to: string | null;
+  readonly strong: boolean;
+};
 
 export interface Row {
   readonly symbol: string | null;
@@ -122,6 +126,8 @@ export interface Series {
 export interface DepthDrawing {
   readonly drawing: "well-and-depth";
   readonly depthUnit: string;
+  /** Depth units in a metre: bores are in metres. */
+  readonly perMetre: number;
   readonly top: number;
   readonly base: number;
   readonly sections: readonly {

@@ -67,24 +67,46 @@ export const descent = model({
       });
     const uniform = liquid.densityAlong === null && liquid.viscosityAlong === null;
     const nodes: Node[] = [];
-    const passages: { name: string; top: number; base: number; upflow: number; net: number | null; netLow: number | null; verdict: Verdict }[] = [];
+    const passages: {
+      name: string;
+      top: number;
+      base: number;
+      upflow: number;
+      net: number | null;
+      netLow: number | null;
+      verdict: Verdict;
+    }[] = [];
     for (const s of well.sections) {
       if (s.base <= from) continue;
       const top = Math.max(s.top, from);
       const upflow = meanVelocity.si({ q: rate, D: s.bore });
       if (shape.widest >= s.bore) {
-        passages.push({ name: s.name, top, base: s.base, upflow, net: null, netLow: null, verdict: "does not fit" });
+        passages.push({
+          name: s.name,
+          top,
+          base: s.base,
+          upflow,
+          net: null,
+          netLow: null,
+          verdict: "does not fit",
+        });
         break;
       }
       if (s.inclination > Math.PI / 18)
-        look.advise(`"${s.name}" leans more than 10°: a body there rides the low side, and this result is a guide only`);
+        look.advise(
+          `"${s.name}" leans more than 10°: a body there rides the low side, and this result is a guide only`,
+        );
       const n = uniform ? 1 : Math.max(1, Math.ceil((s.base - top) / step));
       const here = Array.from({ length: n + 1 }, (_, i): Node => {
         const flow = localFlow(s, top + ((s.base - top) * i) / n);
         const slip =
           shape.shape === "sphere"
             ? sphereSlip({ d: shape.diameter, rhoS: material.density, law }, flow, look)
-            : rodSlip({ d: shape.diameter, L: shape.length, nose: shape.nose, rhoS: material.density }, flow, look);
+            : rodSlip(
+                { d: shape.diameter, L: shape.length, nose: shape.nose, rhoS: material.density },
+                flow,
+                look,
+              );
         return { ...flow, ...slip };
       });
       const least = Math.min(...here.map((k) => k.favourable - k.U));
@@ -127,10 +149,16 @@ function sectionFrom(well: Value<typeof Well>, from: number): Section {
 function spread([a, b]: readonly Node[], step: number): Node[] {
   if (!a || !b) return [];
   const n = Math.max(1, Math.ceil((b.depth - a.depth) / step));
-  return Array.from({ length: n + 1 }, (_, i) => ({ ...a, depth: a.depth + ((b.depth - a.depth) * i) / n }));
+  return Array.from({ length: n + 1 }, (_, i) => ({
+    ...a,
+    depth: a.depth + ((b.depth - a.depth) * i) / n,
+  }));
 }
 
-function told<P extends { readonly verdict: Verdict }>(nodes: readonly Node[], passages: readonly P[]) {
+function told<P extends { readonly verdict: Verdict }>(
+  nodes: readonly Node[],
+  passages: readonly P[],
+) {
   const depth = nodes.map((k) => k.depth);
   const net = nodes.map((k) => k.favourable - k.U);
   const netLow = nodes.map((k) => k.unfavourable - k.U);

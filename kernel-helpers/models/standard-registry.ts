@@ -8,5 +8,14 @@ import { models } from "./registry.js";
 export const standardRegistry: readonly (Use | Struct)[] = [
   ...(methods as unknown as readonly Use[]),
   ...(models as unknown as readonly Use[]),
-  ...([Liquid, SolidMaterial, Sphere, Rod, FallingBody, Grade, BoreSection, Well] as unknown as readonly Struct[]),
+  ...([
+    Liquid,
+    SolidMaterial,
+    Sphere,
+    Rod,
+    FallingBody,
+    Grade,
+    BoreSection,
+    Well,
+  ] as unknown as readonly Struct[]),
 ];

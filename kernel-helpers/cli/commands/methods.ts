@@ -10,9 +10,15 @@ export interface MethodsOptions {
 }
 
 /** `stillwell methods`: what there is, where it comes from, where it holds, what it was checked against. */
-export function listMethods(id: string | undefined, options: MethodsOptions, { terminal }: CommandContext): number {
+export function listMethods(
+  id: string | undefined,
+  options: MethodsOptions,
+  { terminal }: CommandContext,
+): number {
   const chosen = methods.filter(
-    (m) => (id === undefined || m.id === id) && (options.family === undefined || m.family === options.family),
+    (m) =>
+      (id === undefined || m.id === id) &&
+      (options.family === undefined || m.family === options.family),
   );
   if (chosen.length === 0)
     throw new InputError({
@@ -35,7 +41,11 @@ const facts = (m: AnyMethod) => ({
   title: m.title,
   family: m.family,
   source: m.source,
-  ranges: m.rules.map((r) => ({ group: r.group, range: r.range.map((x) => (Number.isFinite(x) ? x : null)), stated: r.stated })),
+  ranges: m.rules.map((r) => ({
+    group: r.group,
+    range: r.range.map((x) => (Number.isFinite(x) ? x : null)),
+    stated: r.stated,
+  })),
   checks: m.checks.map((c) => ({ basis: c.basis, from: c.from, values: c.rows.length })),
 });
 
@@ -44,7 +54,9 @@ function say(m: AnyMethod): string[] {
     `${m.id}  ${m.title}`,
     `    source   ${cited(m.source.cite)}${m.source.where}`,
     `    range    ${m.rules.map((r) => `${r.group} ${sayRange(r)}${r.stated ? "" : " (advised)"}`).join("; ") || "none stated"}`,
-    ...m.checks.map((c) => `    checked  ${c.basis}: ${cited(c.from.cite)}${c.from.where} (${c.rows.length})`),
+    ...m.checks.map(
+      (c) => `    checked  ${c.basis}: ${cited(c.from.cite)}${c.from.where} (${c.rows.length})`,
+    ),
   ];
 }
 function cited(id: string): string {

@@ -14,10 +14,19 @@ interface PackageJson {
 }
 
 /** `stillwell new`: a study folder that runs. Nothing that is there already is overwritten. */
-export function newStudy(folder: string, options: NewOptions, { terminal }: CommandContext): number {
+export function newStudy(
+  folder: string,
+  options: NewOptions,
+  { terminal }: CommandContext,
+): number {
   const root = packageRoot();
   if (existsSync(folder) && !statSync(folder).isDirectory())
-    throw new InputError({ code: "not-a-folder", where: folder, problem: "is a file", expected: "a folder, or a name for a new one" });
+    throw new InputError({
+      code: "not-a-folder",
+      where: folder,
+      problem: "is a file",
+      expected: "a folder, or a name for a new one",
+    });
   mkdirSync(folder, { recursive: true });
   const own = readJsonFile(join(root, "package.json"), "package.json of stillwell") as PackageJson;
   const written: string[] = [];
@@ -29,13 +38,20 @@ export function newStudy(folder: string, options: NewOptions, { terminal }: Comm
     written.push(name);
   };
   const starter = join(root, "starter");
-  for (const name of readdirSync(starter)) put(name === "gitignore" ? ".gitignore" : name, readFileSync(join(starter, name)));
+  for (const name of readdirSync(starter))
+    put(name === "gitignore" ? ".gitignore" : name, readFileSync(join(starter, name)));
   const stub = join(root, "vendor", "tf-stub");
-  for (const name of readdirSync(stub)) put(join("vendor", "tf-stub", name), readFileSync(join(stub, name)));
+  for (const name of readdirSync(stub))
+    put(join("vendor", "tf-stub", name), readFileSync(join(stub, name)));
 
   const file = join(folder, "package.json");
-  const before = existsSync(file) ? (readJsonFile(file, file) as PackageJson) : { name: nameOf(folder), private: true };
-  writeFileAtomic(file, `${JSON.stringify(withStillwell(before, own, options.from ?? fallback(root, folder)), null, 2)}\n`);
+  const before = existsSync(file)
+    ? (readJsonFile(file, file) as PackageJson)
+    : { name: nameOf(folder), private: true };
+  writeFileAtomic(
+    file,
+    `${JSON.stringify(withStillwell(before, own, options.from ?? fallback(root, folder)), null, 2)}\n`,
+  );
   written.push("package.json");
 
   terminal.out(`${folder}: ${written.join(", ")}`);
@@ -45,7 +61,9 @@ export function newStudy(folder: string, options: NewOptions, { terminal }: Comm
 
 /** An installed copy is named by what installed it; a checkout by its folder. */
 function fallback(root: string, folder: string): string {
-  const own = readJsonFile(join(root, "package.json"), "package.json of stillwell") as { version: string };
+  const own = readJsonFile(join(root, "package.json"), "package.json of stillwell") as {
+    version: string;
+  };
   return root.split(/[\\/]/).includes("node_modules")
     ? own.version
     : `file:${relative(resolve(folder), root).replaceAll("\\", "/")}`;

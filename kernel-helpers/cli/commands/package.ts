@@ -12,7 +12,11 @@ export interface PackageOptions extends RunOptions {
 }
 
 /** `stillwell package`: a record, or a notebook that is run first, becomes HTML and PDF. */
-export async function makePackage(source: string, options: PackageOptions, context: CommandContext): Promise<number> {
+export async function makePackage(
+  source: string,
+  options: PackageOptions,
+  context: CommandContext,
+): Promise<number> {
   const { terminal, signal } = context;
   const studies = await studiesOf(source, options, context);
   if (studies === null) return signal.aborted ? 130 : 1;
@@ -29,9 +33,12 @@ export async function makePackage(source: string, options: PackageOptions, conte
     terminal.settle();
     sayRecorded(study, terminal);
     terminal.out(`  HTML   ${written.html}`);
-    if (written.pdf) terminal.out(`  PDF    ${written.pdf} (${written.pages} pages, ${written.browser})`);
+    if (written.pdf)
+      terminal.out(`  PDF    ${written.pdf} (${written.pages} pages, ${written.browser})`);
     if (written.pdfFailure) {
-      terminal.err(`The PDF could not be made; the HTML is complete. ${written.pdfFailure.message}`);
+      terminal.err(
+        `The PDF could not be made; the HTML is complete. ${written.pdfFailure.message}`,
+      );
       code = 1;
     }
   }

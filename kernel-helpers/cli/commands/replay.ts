@@ -9,7 +9,9 @@ export function replayRecord(file: string, { terminal }: CommandContext): number
   const { compared, moved, failed } = replay(record.body, standardRegistry);
   for (const { error } of failed) terminal.out(`could not be replayed: ${error.message}`);
   for (const m of moved)
-    terminal.out(`moved: ${m.id}${m.path} was ${JSON.stringify(m.was)}, now ${JSON.stringify(m.now)}`);
+    terminal.out(
+      `moved: ${m.id}${m.path} was ${JSON.stringify(m.was)}, now ${JSON.stringify(m.now)}`,
+    );
   terminal.out(
     moved.length + failed.length === 0
       ? `All ${compared} values of ${record.body.study.number} rev. ${record.body.study.revision} were recomputed and agree.`

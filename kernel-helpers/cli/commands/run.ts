@@ -8,7 +8,11 @@ export interface RunOptions {
 }
 
 /** `stillwell run`: a notebook becomes records. */
-export async function run(notebook: string, options: RunOptions, context: CommandContext): Promise<number> {
+export async function run(
+  notebook: string,
+  options: RunOptions,
+  context: CommandContext,
+): Promise<number> {
   const { terminal, signal } = context;
   terminal.err(`Running ${notebook}`);
   const studies = await recordNotebook({

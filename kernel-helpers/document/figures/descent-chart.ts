@@ -25,13 +25,11 @@ export const descentChart = chart({
     const largest = Math.max(...parts.flatMap((p) => p.of.value.map(Math.abs)));
     const unit = displayUnit("velocity", system, largest);
     const depthUnit = displayUnit("measuredDepth", system, 1000);
-    const series = parts.map(
-      ({ label, of }): Series => ({
-        label,
-        depth: of.depth.map((x) => inUnit(x as never, depthUnit)),
-        value: of.value.map((x) => inUnit(x as never, unit)),
-      }),
-    );
+    const series = parts.map(({ label, of }): Series => ({
+      label,
+      depth: of.depth.map((x) => inUnit(x as never, depthUnit)),
+      value: of.value.map((x) => inUnit(x as never, unit)),
+    }));
     const stands = [
       { at: d.standsAt, label: "stands still, favourable" },
       { at: d.standsAtLow, label: "stands still, unfavourable" },

@@ -7,11 +7,12 @@ import type { DepthDrawing } from "../view.js";
 export function drawnWell(
   { sections }: Plain<typeof Well>,
   system: DisplaySystem,
-): Pick<DepthDrawing, "depthUnit" | "top" | "base" | "sections"> {
+): Pick<DepthDrawing, "depthUnit" | "perMetre" | "top" | "base" | "sections"> {
   const unit = displayUnit("measuredDepth", system, 1000);
   const depth = (si: number): number => inUnit(si as never, unit);
   return {
     depthUnit: unit.symbol,
+    perMetre: depth(1),
     top: depth(sections[0]?.top ?? 0),
     base: depth(sections.at(-1)?.base ?? 0),
     sections: sections.map((s) => ({

@@ -9,7 +9,10 @@ import type { DisplaySystem } from "../../units/index.js";
 
 type Pack = Plain<typeof restingPack.output>;
 
-function draw({ well, pack }: { well: Plain<typeof Well>; pack: Pack }, system: DisplaySystem): Drawn {
+function draw(
+  { well, pack }: { well: Plain<typeof Well>; pack: Pack },
+  system: DisplaySystem,
+): Drawn {
   const parts = [
     { label: "flow gradient", of: pack.gradient },
     { label: "weight gradient", of: pack.weightGradient },
@@ -32,7 +35,11 @@ function draw({ well, pack }: { well: Plain<typeof Well>; pack: Pack }, system: 
       marks: [{ depth: depth(pack.top), label: "top of the pack" }],
     },
     columns: [
-      { head: "measured depth", numeric: true, ...showColumn("measuredDepth", pack.gradient.depth, system) },
+      {
+        head: "measured depth",
+        numeric: true,
+        ...showColumn("measuredDepth", pack.gradient.depth, system),
+      },
       ...parts.map(({ label, of }) => ({
         head: label,
         numeric: true,

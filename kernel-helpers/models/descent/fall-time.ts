@@ -22,12 +22,16 @@ export function fallTime(depth: readonly number[], net: readonly number[]): Fall
     const s = depth[i] ?? NaN;
     const before = i > 0 ? { s: depth[i - 1] ?? NaN, v: net[i - 1] ?? NaN } : null;
     if (!(v > 0)) {
-      const standsAt = before && before.s < s ? before.s + ((s - before.s) * before.v) / (before.v - v) : s;
+      const standsAt =
+        before && before.s < s ? before.s + ((s - before.s) * before.v) / (before.v - v) : s;
       return { standsAt, arrival: asProfile(reached, times), time: null };
     }
     if (before && s > before.s) {
       const dv = v - before.v;
-      t += Math.abs(dv) < 1e-9 * v ? (s - before.s) / v : ((s - before.s) * Math.log(v / before.v)) / dv;
+      t +=
+        Math.abs(dv) < 1e-9 * v
+          ? (s - before.s) / v
+          : ((s - before.s) * Math.log(v / before.v)) / dv;
     }
     reached.push(s);
     times.push(t);

@@ -10,7 +10,11 @@ export function contentsOf(view: PackageView): ContentsEntry[] {
   return [
     one("purpose", "Purpose"),
     one("conclusions", "Conclusions"),
-    ...view.conclusions.map((c): ContentsEntry => ({ to: c.anchor, text: `${c.number} ${c.title}`, level: 2 })),
+    ...view.conclusions.map((c): ContentsEntry => ({
+      to: c.anchor,
+      text: `${c.number} ${c.title}`,
+      level: 2,
+    })),
     one("cautions", "Limits and cautions"),
     one("inputs", "Inputs"),
     one("assumptions", "Assumptions"),

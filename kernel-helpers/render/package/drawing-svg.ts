@@ -9,29 +9,36 @@ const PLOT = { plotTop: 44, plotBottom: 520 } as const;
 export async function drawingSvg(d: DepthDrawing, label: string): Promise<string> {
   const depthRange = [d.top, d.base] as const;
   const sketch = wellSketch({
-    sections: d.sections.map((s) => ({ name: s.name, top: s.top, base: s.base, bore: s.bore, kind: s.wall })),
+    description: `Well: ${d.sections.map((s) => s.name).join(", ")}`,
+    diameterInDepthUnits: d.perMetre,
+    sections: d.sections.map((s) => ({
+      name: s.name,
+      top: s.top,
+      base: s.base,
+      bore: s.bore,
+      kind: s.wall,
+    })),
     depthRange,
     depthUnit: d.depthUnit,
     pack: d.pack,
-    marks: d.marks,
-    width: 300,
+    marks: d.marks.map(({ depth }) => ({ depth, label: null })),
+    width: 250,
     height: HEIGHT,
     ...PLOT,
   });
   const chart = await renderChart(
     depthChart({
       description: label,
-      series: d.series.map((s) => ({ label: s.label, unit: d.unit, depth: s.depth, value: s.value })),
+      series: d.series,
       depthRange,
-      xTitle: d.xTitle,
-      depthTitle: "measured depth",
-      depthUnit: d.depthUnit,
+      xTitle: `${d.xTitle} [${d.unit}]`,
+      depthTitle: `measured depth [${d.depthUnit}]`,
       sections: d.sections,
       marks: d.marks,
-      width: 420,
+      width: 440,
       height: HEIGHT,
       ...PLOT,
     }),
   );
-  return sideBySide(sketch, chart, label);
+  return sideBySide({ sketch, chart, label });
 }

@@ -1,4 +1,6 @@
 import { charts, packageView, type Block, type PackageView } from "../../document/index.js";
+import type { Environment } from "nunjucks";
+import { RenderError } from "../../errors/index.js";
 import { reference } from "../../method/index.js";
 import type { StudyRecord } from "../../study/index.js";
 import { formatReference } from "../citations/index.js";
@@ -37,12 +39,14 @@ export async function renderHtml(record: StudyRecord, paper: PaperSize): Promise
   const safe = (html: string): unknown => new nunjucks.runtime.SafeString(html);
   const numbers = new Map(view.references.map((r) => [r.id, r.number]));
   environment.addFilter("math", (tex: string, isDisplay = false) => safe(math({ tex, isDisplay })));
-  environment.addFilter("cite", (id: string) => safe(`<a href="#ref-${id}">[${numbers.get(id) ?? "?"}]</a>`));
+  environment.addFilter("cite", (id: string) =>
+    safe(`<a href="#ref-${id}">[${numbers.get(id) ?? "?"}]</a>`),
+  );
   environment.addFilter("reference", (id: string) =>
     safe(formatReference(record.body.references.find((r) => r.id === id) ?? reference(id))),
   );
   environment.addFilter("drawing", (anchor: string) => safe(drawings.get(anchor) ?? ""));
-  const html = environment.render("package.njk", {
+  const html = fill(environment, {
     pkg: strictView(view, "pkg"),
     contents: strictView(contentsOf(view), "contents"),
     exhibits: strictView(exhibitsOf(view), "exhibits"),
@@ -52,10 +56,25 @@ export async function renderHtml(record: StudyRecord, paper: PaperSize): Promise
   return { html: html.replace(FONTS, () => fonts), view };
 }
 
+function fill(environment: Environment, context: object): string {
+  try {
+    return environment.render("package.njk", context);
+  } catch (cause) {
+    throw new RenderError({
+      code: "template",
+      where: "templates",
+      problem: (cause instanceof Error ? cause.message : String(cause)).replace(/\s+/g, " "),
+      remedy: "mend the template; the view it is given is described in document/view.ts",
+      cause,
+    });
+  }
+}
+
 /** Every drawing of a package, by the anchor of its figure. */
 async function drawingsOf(view: PackageView): Promise<ReadonlyMap<string, string>> {
   const out = new Map<string, string>();
   for (const b of view.sections.flatMap((s): readonly Block[] => s.blocks))
-    if (b.kind === "figure" && b.drawing) out.set(b.anchor, await drawingSvg(b.drawing, `${b.number}. ${b.caption}`));
+    if (b.kind === "figure" && b.drawing)
+      out.set(b.anchor, await drawingSvg(b.drawing, `${b.number}. ${b.caption}`));
   return out;
 }

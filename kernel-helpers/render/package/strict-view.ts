@@ -15,7 +15,9 @@ export function strictView<T>(value: T, path: string): T {
           code: "unknown-field",
           where: `${path}.${key}`,
           problem: "is not in the view that templates are given",
-          expected: Array.isArray(target) ? `an index below ${target.length}` : Object.keys(target).join(", "),
+          expected: Array.isArray(target)
+            ? `an index below ${target.length}`
+            : Object.keys(target).join(", "),
         });
       return strictView(found, `${path}.${key}`);
     },

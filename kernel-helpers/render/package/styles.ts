@@ -15,7 +15,10 @@ export function packageStyles(folder: string, { cover }: PackageView, size: Pape
         left: `${cover.number}  rev. ${cover.revision}`,
         right: cover.title.length > 70 ? `${cover.title.slice(0, 69)}…` : cover.title,
       },
-      footer: { left: `${cover.status}. Advisory: check independently before use.`, right: pageOfPages },
+      footer: {
+        left: `${cover.status}. Advisory: check independently before use.`,
+        right: pageOfPages,
+      },
     }),
   ].join("\n");
 }
