@@ -5,6 +5,7 @@ export type { Ipynb, IpynbCell } from "./ipynb.js";
 export * from "./kernel-client.js";
 export type { KernelProcessParts } from "./kernel-process.js";
 export * from "./kernel-command.js";
+export * from "./package-root.js";
 export * from "./run-notebook.js";
 export * from "./run-outcome.js";
 export * from "./show.js";

@@ -162,7 +162,8 @@ export class KernelClient {
         end();
         resolve(message.content);
       });
-      this.channels.send("shell", `${what}_request`, content, id);
+      if (this.kernel.ended !== null) refuse(`the kernel ${this.kernel.ended}`);
+      else this.channels.send("shell", `${what}_request`, content, id);
     });
   }
 

@@ -48,6 +48,7 @@ export async function runNotebook(parts: RunNotebookParts): Promise<RunOutcome> 
     ms: performance.now() - began,
     ...over,
   });
+  if (output !== undefined) makeFolder(output);
   if (signal?.aborted)
     return ended({ status: "interrupted", failedCell: null, cellsRun: 0, drafts: new Map() });
 
@@ -150,19 +151,30 @@ function read(file: string): string {
   }
 }
 
+/** Done first: nobody wants to learn after a long run that it cannot be stored. */
+function makeFolder(file: string): void {
+  try {
+    mkdirSync(dirname(resolve(file)), { recursive: true });
+  } catch (cause) {
+    throw unwritable(file, cause);
+  }
+}
+
 /** Beside its place and then renamed, so that a reader never meets half a notebook. */
 function write(file: string, text: string): void {
   const beside = `${file}.${process.pid}.tmp`;
   try {
-    mkdirSync(dirname(resolve(file)), { recursive: true });
     writeFileSync(beside, text);
     renameSync(beside, file);
   } catch (cause) {
-    throw new NotebookError({
-      code: "unwritable",
-      where: file,
-      problem: `cannot be written (${cause instanceof Error ? cause.message : String(cause)})`,
-      cause,
-    });
+    throw unwritable(file, cause);
   }
 }
+
+const unwritable = (file: string, cause: unknown): NotebookError =>
+  new NotebookError({
+    code: "unwritable",
+    where: file,
+    problem: `cannot be written (${cause instanceof Error ? cause.message : String(cause)})`,
+    cause,
+  });

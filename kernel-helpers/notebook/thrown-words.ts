@@ -2,9 +2,10 @@ import { inspect } from "node:util";
 import type { ErrorReport } from "./compiler-words.js";
 import { excerpt } from "./excerpt.js";
 
-/** A place in a cell's source; both 1-based. */
-export interface CellPlace {
-  readonly cell: number;
+/** A place in the source of a cell or of a module beside the notebook; both 1-based. */
+export interface SourcePlace {
+  readonly cell: number | null;
+  readonly file: string | null;
   readonly line: number;
   readonly column: number;
 }
@@ -14,8 +15,8 @@ export interface ThrownParts {
   /** The cell that ran, and its source. */
   readonly cell: number;
   readonly source: string;
-  /** Where in a cell's source a place of a stack frame lies, or null when it is not in a cell. */
-  readonly locate: (frame: { script: string; line: number; column: number }) => CellPlace | null;
+  /** Where in a source a place of a stack frame lies, or null when it is in none of the analyst's. */
+  readonly locate: (frame: { script: string; line: number; column: number }) => SourcePlace | null;
   /** True for the stack frames of the machinery that runs cells. */
   readonly isOurs: (frame: string) => boolean;
 }
@@ -50,7 +51,7 @@ export function thrownReport(parts: ThrownParts): ErrorReport {
 
 interface Frame {
   readonly text: string;
-  readonly place: CellPlace | null;
+  readonly place: SourcePlace | null;
 }
 
 const FRAME = /^\s+at (?:(.*) \()?(.*?):(\d+):(\d+)\)?$/;
@@ -62,7 +63,7 @@ function framesOf(thrown: unknown, { locate, isOurs }: ThrownParts): Frame[] {
     if (script === "") return [];
     const place = locate({ script, line: Number(row), column: Number(column) });
     if (place) {
-      const at = `cell ${place.cell}, line ${place.line}`;
+      const at = `${place.file ?? `cell ${place.cell ?? "?"}`}, line ${place.line}`;
       return [{ text: by ? `${by.replace(/^Proxy\./, "")} (${at})` : at, place }];
     }
     if (isOurs(line)) return [];

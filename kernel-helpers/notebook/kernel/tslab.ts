@@ -1,8 +1,9 @@
 import { createRequire } from "node:module";
-import { dirname, join } from "node:path";
+import { dirname, join, relative } from "node:path";
 import type ts from "@tslab/typescript-for-tslab";
 import type { Diagnostic } from "../compiler-words.js";
 import type { KnownType } from "../known-type.js";
+import { awaitsInLoop, earlierNames } from "./earlier-names.js";
 import { lastExpressionType } from "./last-expression-type.js";
 import { SourcePositions } from "./source-positions.js";
 import { typeResolution } from "./type-resolution.js";
@@ -41,7 +42,7 @@ const load = createRequire(import.meta.url);
 
 /**
  * The one place that knows the insides of tslab (pinned). What is not open to settings is reached
- * by handing tslab a compiler with three of its functions replaced, before tslab first loads it.
+ * by handing tslab a compiler with some of its functions replaced, before tslab first loads it.
  */
 export function createEngine({ root, cwd, onDisplay }: EngineParts): Engine {
   const tslabFolder = dirname(load.resolve("tslab/package.json"));
@@ -49,11 +50,12 @@ export function createEngine({ root, cwd, onDisplay }: EngineParts): Engine {
   const compilerFile = fromTslab.resolve("@tslab/typescript-for-tslab");
   const compiler = fromTslab(compilerFile) as typeof ts;
   const types = typeResolution({ compiler, root, cwd });
-  const positions = new SourcePositions();
+  const positions = new SourcePositions(cwd);
 
   let cell = 0;
   let known: KnownType | null = null;
   let raised: readonly ts.Diagnostic[] = [];
+  let hasLoopAwait = false;
 
   const replaced = {
     createWatchCompilerHost(
@@ -65,11 +67,26 @@ export function createEngine({ root, cwd, onDisplay }: EngineParts): Engine {
       const host = compiler.createWatchCompilerHost(files, types.options(options), system, ...rest);
       return Object.assign(host, types.resolver(host));
     },
+    createWatchProgram(host: ts.WatchCompilerHostOfFilesAndCompilerOptions<ts.BuilderProgram>) {
+      const tell = host.afterProgramCreate?.bind(host);
+      host.afterProgramCreate = (builder) => {
+        const emit = builder.emit.bind(builder);
+        builder.emit = (file, write, token, onlyTypes, custom) => {
+          const earlier = builder.getSourceFiles().find((f) => f.fileName.endsWith(EARLIER));
+          const checker = builder.getProgram().getTypeChecker();
+          const before = earlier ? [earlierNames({ compiler, checker, earlier })] : [];
+          return emit(file, write, token, onlyTypes, { ...custom, before });
+        };
+        tell?.(builder);
+      };
+      return compiler.createWatchProgram(host);
+    },
     // The last look at the checked cell, before its tree is rewritten for output.
     getPreEmitDiagnosticsOfFiles(program: ts.Program, files: ts.SourceFile[]) {
       const [file] = files;
       raised = compiler.getPreEmitDiagnosticsOfFiles(program, files);
       known = file ? lastExpressionType(compiler, program.getTypeChecker(), file) : null;
+      hasLoopAwait = file !== undefined && awaitsInLoop(compiler, file);
       return raised;
     },
     transpileModule(javascript: string, options: ts.TranspileOptions) {
@@ -109,7 +126,7 @@ export function createEngine({ root, cwd, onDisplay }: EngineParts): Engine {
       raised = [];
       const converted = converter.convert(declared, source);
       refused = converted.diagnostics.length > 0 ? chains(compiler, raised, converted, cwd) : [];
-      return converted;
+      return hasLoopAwait ? { ...converted, hasToplevelAwait: true } : converted;
     },
   };
   const executor = createExecutor(
@@ -149,11 +166,14 @@ export function createEngine({ root, cwd, onDisplay }: EngineParts): Engine {
     },
     isComplete: isCompleteCode,
     interrupt: () => executor.interrupt(),
-    isOwnFrame: (line) => line.includes(tslabFolder) || line.includes(dirname(compilerFile)),
+    isOwnFrame: (line) =>
+      positions.isCell(line) || line.includes(tslabFolder) || line.includes(dirname(compilerFile)),
     close: () => executor.close(),
   };
 }
 
+/** The file in which tslab keeps the declarations of earlier cells. */
+const EARLIER = "__prev__.d.ts";
 const LINK_FORMAT = "%s%d:%d - %s";
 
 function asDiagnostic([file, line, column, message]: readonly unknown[]): Diagnostic {
@@ -181,7 +201,7 @@ function chains(
     const isCell = d.file.fileName.endsWith("__tslab__.ts");
     return [
       {
-        file: isCell ? null : d.file.fileName.replace(`${cwd}/`, ""),
+        file: isCell ? null : relative(cwd, d.file.fileName),
         // tslab puts one line of its own before the cell.
         line: isCell ? line : line + 1,
         column: character + 1,

@@ -9,20 +9,34 @@ export interface TypeResolutionParts {
   readonly cwd: string;
 }
 
-type Resolver = Required<
-  Pick<
-    ts.WatchCompilerHostOfFilesAndCompilerOptions<ts.BuilderProgram>,
-    "resolveModuleNameLiterals"
-  >
->;
+export interface TypeResolution {
+  /** The compiler options of tslab, with ours. */
+  readonly options: (given: ts.CompilerOptions) => ts.CompilerOptions;
+  /** What is put over the functions of tslab's compiler host. */
+  readonly resolver: (host: ts.ModuleResolutionHost) => Resolver;
+}
+interface Resolver {
+  readonly resolveModuleNameLiterals: NonNullable<
+    ts.ModuleResolutionHost & ts.CompilerHost
+  >["resolveModuleNameLiterals"];
+  readonly hasInvalidatedResolutions: () => boolean;
+}
+type Resolution = ts.ResolvedModuleWithFailedLookupLocations;
 
 /**
  * How the cells' compiler finds types: our name is always this package, other names are looked up
  * from the notebook's folder first and from ours where that fails.
  */
-export function typeResolution({ compiler, root, cwd }: TypeResolutionParts) {
-  const ours = join(root, typesIn(root));
-  const home = join(root, "home.ts");
+export function typeResolution(parts: TypeResolutionParts): TypeResolution {
+  const { compiler } = parts;
+  const [root, cwd] = [slashed(parts.root), slashed(parts.cwd)];
+  const ours: Resolution & { failedLookupLocations?: never } = {
+    resolvedModule: {
+      resolvedFileName: `${root}/${typesIn(root)}`,
+      extension: compiler.Extension.Dts,
+      isExternalLibraryImport: true,
+    },
+  };
   const nodeTypes = findNodeTypes(root);
 
   const options = (given: ts.CompilerOptions): ts.CompilerOptions => ({
@@ -30,43 +44,51 @@ export function typeResolution({ compiler, root, cwd }: TypeResolutionParts) {
     moduleResolution: compiler.ModuleResolutionKind.Bundler,
     strictNullChecks: true,
     inlineSourceMap: true,
-    // Only to give declarations a name that stands in any folder; names are found below.
-    paths: { stillwell: [ours], "*": moduleFolders(root).map((folder) => `${folder}/*`) },
+    // Only so that the types of declarations have a name that stands in any folder.
+    paths: {
+      stillwell: [`${root}/${typesIn(root)}`],
+      "*": moduleFolders(root).map((folder) => `${folder}/*`),
+    },
     types: ["node"],
-    ...(nodeTypes === null
-      ? {}
-      : { typeRoots: [nodeTypes, ...(given.typeRoots ?? []).filter((r) => r.startsWith(cwd))] }),
+    typeRoots: [
+      ...(nodeTypes === null ? [] : [nodeTypes]),
+      ...(given.typeRoots ?? []).filter((r) => nodeTypes === null || r.startsWith(cwd)),
+    ],
   });
 
-  const resolver = (
-    host: ts.ModuleResolutionHost,
-  ): Resolver & { hasInvalidatedResolutions: () => boolean } => ({
-    resolveModuleNameLiterals: (literals, from, redirected, given, file) => {
-      const { paths: _, ...plain } = given;
-      return literals.map((literal) => {
-        const name = literal.text;
-        if (name === "stillwell")
-          return {
-            resolvedModule: {
-              resolvedFileName: ours,
-              extension: ".d.ts",
-              isExternalLibraryImport: true,
-            },
-          };
-        const mode = compiler.getModeForUsageLocation(file, literal);
-        const look = (place: string): ts.ResolvedModuleWithFailedLookupLocations =>
-          compiler.resolveModuleName(name, place, plain, host, undefined, redirected, mode);
-        const found = look(from);
-        if (found.resolvedModule || /^[./]/.test(name)) return found;
-        const fallback = look(home);
-        return fallback.resolvedModule ? fallback : found;
-      });
-    },
-    // Without this every resolution of every file is made again for each cell.
-    hasInvalidatedResolutions: () => false,
-  });
+  const resolver = (host: ts.ModuleResolutionHost): Resolver => {
+    // What an installed package imports does not change while a kernel lives.
+    const lasting = new Map<string, Resolution>();
+    return {
+      resolveModuleNameLiterals: (literals, from, redirected, given, file) => {
+        const { paths: _, ...plain } = given;
+        const isInstalled = from.includes("/node_modules/") || from.startsWith(`${root}/dist/`);
+        return literals.map((literal) => {
+          const name = literal.text;
+          if (name === "stillwell") return ours;
+          const mode = compiler.getModeForUsageLocation(file, literal);
+          const key = `${from}\n${name}\n${mode ?? ""}`;
+          const kept = isInstalled ? lasting.get(key) : undefined;
+          if (kept) return kept;
+          const look = (place: string): Resolution =>
+            compiler.resolveModuleName(name, place, plain, host, undefined, redirected, mode);
+          const near = look(from);
+          const isFound = near.resolvedModule !== undefined || /^[./]/.test(name);
+          const home = isFound ? near : look(`${root}/home.ts`);
+          const found = home.resolvedModule ? home : near;
+          if (isInstalled) lasting.set(key, found);
+          return found;
+        });
+      },
+      // Without this every resolution of every file is made again for each cell.
+      hasInvalidatedResolutions: () => false,
+    };
+  };
   return { options, resolver };
 }
+
+/** The compiler writes paths with slashes on every system. */
+const slashed = (path: string): string => path.replaceAll("\\", "/");
 
 function typesIn(root: string): string {
   const parsed: unknown = JSON.parse(readFileSync(join(root, "package.json"), "utf8"));
@@ -75,9 +97,9 @@ function typesIn(root: string): string {
 }
 
 function moduleFolders(root: string): string[] {
-  return (createRequire(join(root, "package.json")).resolve.paths("x") ?? []).filter((folder) =>
-    folder.endsWith("node_modules"),
-  );
+  return (createRequire(join(root, "package.json")).resolve.paths("x") ?? [])
+    .filter((folder) => folder.endsWith("node_modules"))
+    .map(slashed);
 }
 
 /** The folder that holds the types of Node, ours or those that tslab brings. */
@@ -85,7 +107,7 @@ function findNodeTypes(root: string): string | null {
   const own = createRequire(join(root, "package.json"));
   for (const from of [own, createRequire(own.resolve("tslab/package.json"))]) {
     try {
-      return dirname(dirname(from.resolve("@types/node/package.json")));
+      return slashed(dirname(dirname(from.resolve("@types/node/package.json"))));
     } catch {
       continue;
     }
