@@ -1,10 +1,5 @@
 export type ChartValue =
-  | string
-  | number
-  | boolean
-  | null
-  | readonly ChartValue[]
-  | { readonly [key: string]: ChartValue };
+  string | number | boolean | null | readonly ChartValue[] | { readonly [key: string]: ChartValue };
 
 /** A vega-lite specification, as plain data. */
 export interface ChartSpec {

@@ -1,13 +1,20 @@
 import { InputError } from "../../errors/index.js";
-import { spread } from "../lettering/spread.js";
 import { textWidth } from "../lettering/text-width.js";
-import type { ChartSpec, ChartValue } from "./chart-spec.js";
+import type { ChartSpec } from "./chart-spec.js";
 import { chartTheme, numberLabel } from "./chart-theme.js";
 import { checkDepthChart } from "./check-depth-chart.js";
 import type { Box, Point } from "./geometry.js";
 import { niceRange, niceTicks } from "./nice-ticks.js";
-import { accent, lineStyle, paleInk } from "./palette.js";
-import { placeLineLabels, type LabelPlace } from "./place-line-labels.js";
+import {
+  depthMarks,
+  labelHeight,
+  labelSize as size,
+  lineLabel,
+  sectionEnds,
+  seriesLayer,
+  valueMarkLayers,
+} from "./depth-chart-layers.js";
+import { placeLineLabels } from "./place-line-labels.js";
 
 export interface DepthSeries {
   readonly label: string;
@@ -38,9 +45,6 @@ export interface DepthChart {
   readonly plotBottom: number;
 }
 
-const size = 10;
-const labelHeight = 13;
-
 /**
  * The specification of a chart of values against depth, depth running down: pure data, the same for
  * the same input. The depth range covers exactly the pixels from `plotTop` to `plotBottom`, so that a
@@ -52,7 +56,9 @@ export function depthChart(chart: DepthChart): ChartSpec {
   const { marks = [], valueMarks = [], sections = [] } = chart;
   const plotHeight = plotBottom - plotTop;
   const depthTicks = niceTicks(depthRange, plotHeight / 55);
-  const tickWidth = Math.max(...depthTicks.values.map((v) => textWidth({ text: v.toFixed(depthTicks.decimals), size })));
+  const tickWidth = Math.max(
+    ...depthTicks.values.map((v) => textWidth({ text: v.toFixed(depthTicks.decimals), size })),
+  );
   const left = Math.ceil(tickWidth + 34);
   const markWidth = Math.max(0, ...marks.map((mark) => textWidth({ text: mark.label, size }) + 14));
   const right = Math.ceil(Math.max(14, markWidth));
@@ -67,7 +73,10 @@ export function depthChart(chart: DepthChart): ChartSpec {
 
   const xRange =
     chart.xRange ??
-    niceRange([...series.flatMap((s) => s.value), ...valueMarks.map((m) => m.value)], plotWidth / 70);
+    niceRange(
+      [...series.flatMap((s) => s.value), ...valueMarks.map((m) => m.value)],
+      plotWidth / 70,
+    );
   const xTicks = niceTicks(xRange, plotWidth / 70);
   const atX = scale(xRange, plotWidth);
   const atDepth = scale(depthRange, plotHeight);
@@ -105,8 +114,24 @@ export function depthChart(chart: DepthChart): ChartSpec {
     points: visiblePart(s, depthRange).map(([value, depth]): Point => [atX(value), atDepth(depth)]),
     labelWidth: textWidth({ text: s.label, size, isSemibold: true }),
   }));
-  const placed = placeLineLabels({ lines, area, labelHeight, taken: [] });
-  const ends = sections.flatMap(({ top, base }) => [top, base]).filter((d) => d > depthRange[0] && d < depthRange[1]);
+  const taken: readonly Box[] = [
+    ...marks.map((m) => ({
+      left: 0,
+      right: plotWidth,
+      top: atDepth(m.depth),
+      bottom: atDepth(m.depth),
+    })),
+    ...valueMarks.map((m) => ({
+      left: atX(m.value),
+      right: atX(m.value),
+      top: 0,
+      bottom: plotHeight,
+    })),
+  ];
+  const placed = placeLineLabels({ lines, area, labelHeight, taken });
+  const ends = sections
+    .flatMap(({ top, base }) => [top, base])
+    .filter((d) => d > depthRange[0] && d < depthRange[1]);
 
   return {
     $schema: "https://vega.github.io/schema/vega-lite/v6.json",
@@ -117,11 +142,11 @@ export function depthChart(chart: DepthChart): ChartSpec {
     autosize: { type: "none" },
     config: chartTheme,
     layer: [
-      ...rules([...new Set(ends)], { y }),
+      ...sectionEnds([...new Set(ends)], { y }),
       ...depthMarks(marks, atDepth, { plotWidth, plotHeight }),
-      ...valueLines(valueMarks, atX, plotHeight),
+      ...valueMarkLayers(valueMarks, atX, plotHeight),
       ...series.map((s, i) => seriesLayer(s, i, { x, y })),
-      ...placed.flatMap((place, i) => labelLayers(place, series[i]?.label ?? "", i)),
+      ...placed.flatMap((place, i) => lineLabel(place, series[i]?.label ?? "", i)),
     ],
   };
 }
@@ -146,120 +171,4 @@ function visiblePart(s: DepthSeries, [top, bottom]: readonly [number, number]): 
     if (depth >= top && depth <= bottom) points.push([value, depth]);
   });
   return points;
-}
-
-type Layer = { readonly [key: string]: ChartValue };
-
-const pixels = (field: string): Layer => ({ field, type: "quantitative", scale: null, axis: null });
-
-function seriesLayer(s: DepthSeries, i: number, { x, y }: { x: Layer; y: Layer }): Layer {
-  const { colour, dash } = lineStyle(i);
-  return {
-    name: `series-${i + 1}`,
-    data: { values: s.depth.map((depth, k) => ({ depth, value: s.value[k] ?? null, k })) },
-    mark: { type: "line", clip: true, color: colour, strokeDash: dash.length > 0 ? [...dash] : [1, 0] },
-    encoding: { x, y, order: { field: "k", type: "quantitative" } },
-  };
-}
-
-function rules(depths: readonly number[], { y }: { y: Layer }): readonly Layer[] {
-  if (depths.length === 0) return [];
-  return [
-    {
-      name: "section-ends",
-      data: { values: depths.map((depth) => ({ depth })) },
-      mark: { type: "rule", color: paleInk, strokeWidth: 0.5 },
-      encoding: { y },
-    },
-  ];
-}
-
-/** A dashed line at each depth, and its name in the right margin, moved if names would touch. */
-function depthMarks(
-  marks: NonNullable<DepthChart["marks"]>,
-  atDepth: (depth: number) => number,
-  { plotWidth, plotHeight }: { plotWidth: number; plotHeight: number },
-): readonly Layer[] {
-  if (marks.length === 0) return [];
-  const middles = spread(
-    marks.map((mark) => ({ wanted: atDepth(mark.depth), height: labelHeight })),
-    { from: 0, to: plotHeight, gap: 0 },
-  );
-  const values = marks.map((mark, i) => ({
-    label: mark.label,
-    y: atDepth(mark.depth),
-    yLabel: middles[i] ?? 0,
-    x: 0,
-    xEnd: plotWidth,
-    xLabel: plotWidth + 10,
-  }));
-  const [y, xEnd] = [pixels("y"), pixels("xEnd")];
-  return [
-    {
-      name: "depth-marks",
-      data: { values },
-      mark: { type: "rule", color: accent, strokeDash: [3, 2], strokeWidth: 0.9 },
-      encoding: { x: pixels("x"), x2: { field: "xEnd" }, y },
-    },
-    {
-      data: { values },
-      mark: { type: "rule", color: accent, strokeWidth: 0.75 },
-      encoding: { x: xEnd, x2: { field: "xLabel" }, y, y2: { field: "yLabel" } },
-    },
-    {
-      data: { values },
-      mark: { type: "text", align: "left", baseline: "middle", dx: 2, color: accent, fontSize: size },
-      encoding: { x: pixels("xLabel"), y: pixels("yLabel"), text: { field: "label" } },
-    },
-  ];
-}
-
-function valueLines(
-  marks: NonNullable<DepthChart["valueMarks"]>,
-  atX: (value: number) => number,
-  plotHeight: number,
-): readonly Layer[] {
-  if (marks.length === 0) return [];
-  const values = marks.map((mark) => ({ label: mark.label, x: atX(mark.value), y: 0, yEnd: plotHeight }));
-  return [
-    {
-      name: "value-marks",
-      data: { values },
-      mark: { type: "rule", color: accent, strokeDash: [3, 2], strokeWidth: 0.9 },
-      encoding: { x: pixels("x"), y: pixels("y"), y2: { field: "yEnd" } },
-    },
-    {
-      data: { values },
-      mark: { type: "text", baseline: "top", dy: 4, color: accent, fontSize: size },
-      encoding: { x: pixels("x"), y: pixels("yEnd"), text: { field: "label" } },
-    },
-  ];
-}
-
-function labelLayers(place: LabelPlace, text: string, i: number): readonly Layer[] {
-  const { colour, dash } = lineStyle(i);
-  const { box } = place;
-  const y = (box.top + box.bottom) / 2;
-  const layers: Layer[] = [];
-  const line = (name: string, [from, to]: readonly [Point, Point], mark: Layer): Layer => ({
-    name,
-    data: { values: [{ x: from[0], y: from[1], x2: to[0], y2: to[1] }] },
-    mark: { type: "rule", color: colour, ...mark },
-    encoding: { x: pixels("x"), y: pixels("y"), x2: { field: "x2" }, y2: { field: "y2" } },
-  });
-  if (place.leader) layers.push(line(`leader-${i + 1}`, place.leader, { strokeWidth: 0.6 }));
-  if (place.isKey) {
-    const sample: readonly [Point, Point] = [[box.left - 26, y], [box.left - 5, y]];
-    layers.push(line(`sample-${i + 1}`, sample, { strokeWidth: 1.6, strokeDash: dash.length > 0 ? [...dash] : [1, 0] }));
-  }
-  const label = (name: string, mark: Layer): Layer => ({
-    name,
-    data: { values: [{ x: box.left, y, text }] },
-    mark: { type: "text", align: "left", baseline: "middle", fontSize: size, fontWeight: 600, ...mark },
-    encoding: { x: pixels("x"), y: pixels("y"), text: { field: "text" } },
-  });
-  // White behind the letters keeps grid lines out of them.
-  layers.push(label(`halo-${i + 1}`, { color: "white", stroke: "white", strokeWidth: 3, strokeJoin: "round" }));
-  layers.push(label(`label-${i + 1}`, { color: colour }));
-  return layers;
 }

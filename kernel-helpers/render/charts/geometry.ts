@@ -8,7 +8,10 @@ export interface Box {
 }
 
 export const overlaps = (a: Box, b: Box, gap = 0): boolean =>
-  a.left < b.right + gap && b.left < a.right + gap && a.top < b.bottom + gap && b.top < a.bottom + gap;
+  a.left < b.right + gap &&
+  b.left < a.right + gap &&
+  a.top < b.bottom + gap &&
+  b.top < a.bottom + gap;
 
 export const isInside = (inner: Box, outer: Box): boolean =>
   inner.left >= outer.left &&
@@ -16,21 +19,31 @@ export const isInside = (inner: Box, outer: Box): boolean =>
   inner.top >= outer.top &&
   inner.bottom <= outer.bottom;
 
-/** The least distance from a box to a line of straight pieces; 0 if the line enters it. */
-export function distanceToLine(box: Box, line: readonly Point[]): number {
-  let least = Infinity;
+/**
+ * The least distance from a box to a line of straight pieces; 0 if the line enters it, and `limit` if
+ * it is further away than that.
+ */
+export function distanceToLine(box: Box, line: readonly Point[], limit: number): number {
+  let least = limit;
   const first = line[0];
-  if (first && line.length === 1) return pointToBox(first, box);
+  if (first && line.length === 1) return Math.min(limit, pointToBox(first, box));
   for (let i = 1; i < line.length; i++) {
     const a = line[i - 1];
     const b = line[i];
-    if (!a || !b) continue;
+    // Most pieces are far away, which a look at their ends tells.
+    if (!a || !b || isBeyond(a, b, box, least)) continue;
     if (entersBox(a, b, box)) return 0;
     least = Math.min(least, pointToBox(a, box), pointToBox(b, box));
     for (const corner of corners(box)) least = Math.min(least, pointToPiece(corner, a, b));
   }
   return least;
 }
+
+const isBeyond = ([ax, ay]: Point, [bx, by]: Point, box: Box, distance: number): boolean =>
+  Math.max(ay, by) < box.top - distance ||
+  Math.min(ay, by) > box.bottom + distance ||
+  Math.max(ax, bx) < box.left - distance ||
+  Math.min(ax, bx) > box.right + distance;
 
 const corners = (b: Box): readonly Point[] => [
   [b.left, b.top],

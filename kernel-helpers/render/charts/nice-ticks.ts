@@ -23,7 +23,8 @@ export function niceTicks([from, to]: readonly [number, number], count: number):
   const digits = factor === 10 ? power + 1 : power;
   const unit = factor === 10 ? 1 : factor;
   // Multiples of a power of ten below one are not exact; quotients are.
-  const value = (n: number): number => (digits < 0 ? (n * unit) / 10 ** -digits : n * unit * 10 ** digits);
+  const value = (n: number): number =>
+    digits < 0 ? (n * unit) / 10 ** -digits : n * unit * 10 ** digits;
   const step = value(1);
   const slack = 1e-9;
   const values: number[] = [];

@@ -14,7 +14,7 @@ export interface LabelPlace {
 }
 
 const places = 25;
-const gaps = [5, 18, 36];
+const gaps = [5, 18, 36, 60, 90];
 const clearance = 2;
 
 /**
@@ -37,12 +37,14 @@ export function placeLineLabels({
   return lines.map((line, own) => {
     let best: { place: LabelPlace; cost: number } | null = null;
     for (const candidate of candidates(line, labelHeight)) {
+      if (best && candidate.cost >= best.cost) continue;
       const { box } = candidate.place;
       if (!isInside(box, area) || used.some((other) => overlaps(box, other, clearance))) continue;
       const cost = candidate.cost + costOfLines(candidate, lines, own);
       if (!best || cost < best.cost) best = { place: candidate.place, cost };
     }
-    const place = best && best.cost < Infinity ? best.place : keyPlace(line, area, labelHeight, keys++);
+    const place =
+      best && best.cost < Infinity ? best.place : keyPlace(line, area, labelHeight, keys++);
     used.push(place.box);
     return place;
   });
@@ -66,10 +68,19 @@ function* candidates(line: LabelledLine, height: number): Generator<Candidate> {
     for (const [g, gap] of gaps.entries())
       for (const side of ["right", "left"] as const) {
         const left = side === "right" ? x + gap : x - gap - line.labelWidth;
-        const box = { left, right: left + line.labelWidth, top: y - height / 2, bottom: y + height / 2 };
+        const box = {
+          left,
+          right: left + line.labelWidth,
+          top: y - height / 2,
+          bottom: y + height / 2,
+        };
         const near = side === "right" ? box.left - 2 : box.right + 2;
         const leader: LabelPlace["leader"] = g === 0 ? null : [anchor, [near, y]];
-        yield { place: { box, leader, isKey: false }, cost: cost + 8 * g + (side === "left" ? 1 : 0), gap };
+        yield {
+          place: { box, leader, isKey: false },
+          cost: cost + 8 * g + (side === "left" ? 1 : 0),
+          gap,
+        };
       }
     for (const side of [-1, 1]) {
       const middle = y + side * (height / 2 + 4);
@@ -84,10 +95,14 @@ function* candidates(line: LabelledLine, height: number): Generator<Candidate> {
   }
 }
 
-function costOfLines({ place, gap }: Candidate, lines: readonly LabelledLine[], own: number): number {
+function costOfLines(
+  { place, gap }: Candidate,
+  lines: readonly LabelledLine[],
+  own: number,
+): number {
   let cost = 0;
   for (const [i, line] of lines.entries()) {
-    const distance = distanceToLine(place.box, line.points);
+    const distance = distanceToLine(place.box, line.points, gap + 6);
     if (i === own) {
       if (distance < 1) cost += 60;
       continue;
@@ -96,9 +111,16 @@ function costOfLines({ place, gap }: Candidate, lines: readonly LabelledLine[], 
     // Without a leader the nearest line must be the one that is named, clearly.
     else if (!place.leader && distance < gap + 6) cost += distance <= gap + 1 ? 80 : 12;
     else if (place.leader) {
+      // A label that touches a line seems to belong to it, whatever its leader says.
+      if (distance < 9) cost += 15;
       const [[ax, ay], [bx]] = place.leader;
-      const between = { left: Math.min(ax, bx) + 1, right: Math.max(ax, bx) - 1, top: ay, bottom: ay };
-      if (distanceToLine(between, line.points) === 0) cost += 30;
+      const between = {
+        left: Math.min(ax, bx) + 1,
+        right: Math.max(ax, bx) - 1,
+        top: ay,
+        bottom: ay,
+      };
+      if (distanceToLine(between, line.points, 1) === 0) cost += 30;
     }
   }
   return cost;

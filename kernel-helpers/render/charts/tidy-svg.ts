@@ -1,7 +1,6 @@
 import { raiseInSvg } from "../lettering/typeset.js";
 
-const needless =
-  / (?:role|class|pointer-events|aria-[a-z]+|version|xmlns:xlink)="[^"]*"/g;
+const needless = / (?:role|class|pointer-events|aria-[a-z]+|version|xmlns:xlink)="[^"]*"/g;
 
 /**
  * Vega's drawing made fit for a document: ids that no other drawing on the page has (vega counts them
@@ -28,7 +27,8 @@ export function tidySvg(svg: string, prefix: string): string {
         .replace(/url\(#([^)]*)\)/g, (_, id: string) => `url(#${newId(id)})`)
         .replace(/-?\d+\.\d{3,}(?:e-?\d+)?/g, (n) => String(Math.round(Number(n) * 100) / 100 + 0)),
     )
-    .replace(/(<text[^>]*>)([^<]*)(<\/text>)/g, (_, open: string, text: string, end: string) =>
-      open + raiseInSvg(text) + end,
+    .replace(
+      /(<text[^>]*>)([^<]*)(<\/text>)/g,
+      (_, open: string, text: string, end: string) => open + raiseInSvg(text) + end,
     );
 }

@@ -18,7 +18,7 @@ export function spread(
   for (const i of order) {
     let block = { members: [i], size: at(slots, i).height, top: 0 };
     block.top = topOf(block);
-    for (let above = blocks.at(-1); above && above.top + above.size + gap > block.top; ) {
+    for (let above = blocks.at(-1); above && above.top + above.size + gap > block.top;) {
       blocks.pop();
       block = {
         members: [...above.members, ...block.members],

@@ -68,6 +68,8 @@ export const operators: Readonly<Record<string, string>> = {
   "\\implies": "hence",
   "\\in": "in",
   "\\mid": "given",
+  "\\quad": ",",
+  "\\qquad": ",",
 };
 
 export const functions: Readonly<Record<string, string>> = {
@@ -111,7 +113,7 @@ export const nameCommands = named(
 /** Commands that only move or size things. */
 export const silent: ReadonlySet<string> = new Set([
   ...named(
-    "quad qquad thinspace enspace displaystyle textstyle scriptstyle limits nolimits nonumber middle " +
+    "thinspace enspace displaystyle textstyle scriptstyle limits nolimits nonumber middle " +
       "big Big bigg Bigg bigl bigr Bigl Bigr biggl biggr Biggl Biggr hfill allowbreak nobreak ! , ; : >",
   ),
   "\\ ",

@@ -32,7 +32,8 @@ function say(node: TexNode): string {
   }
 }
 
-function sayRow(items: readonly TexNode[]): string {
+function sayRow(all: readonly TexNode[]): string {
+  const items = withoutIdlePauses(all);
   let text = "";
   items.forEach((item, i) => {
     const before = items[i - 1];
@@ -52,8 +53,17 @@ function sayRow(items: readonly TexNode[]): string {
   return text;
 }
 
+const isPause = (node: TexNode | undefined): boolean =>
+  node?.kind === "operator" && /^[,;]$/.test(node.text);
+
+/** Wide spaces are read as commas, of which one is enough, and none at either end. */
+const withoutIdlePauses = (items: readonly TexNode[]): readonly TexNode[] =>
+  items.filter(
+    (item, i) => !isPause(item) || (i > 0 && i < items.length - 1 && !isPause(items[i + 1])),
+  );
+
 function between(a: TexNode, b: TexNode): string {
-  if (b.kind === "operator" && /^[,;]$/.test(b.text)) return "";
+  if (isPause(b)) return "";
   if ([a, b].some((n) => n.kind === "operator" || n.kind === "words")) return " ";
   if (a.kind === "prefix" || isDegrees(a)) return " ";
   // p(z) is a function of z, µ(1 − ε) is a product.

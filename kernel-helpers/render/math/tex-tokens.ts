@@ -25,6 +25,8 @@ export function texTokens(tex: string): readonly TexToken[] {
     if (/^[\d.]/.test(text) && ["^", "_"].includes(tokens.at(-1)?.text ?? ""))
       text = text.slice(0, 1);
     at += text.length;
+    // The space below a row: \\[1ex].
+    if (text === "\\\\") at += /^\s*\[[^\]]*\]/.exec(tex.slice(at))?.[0].length ?? 0;
     const isText = textCommands.has(text);
     const isName = nameCommands.has(text);
     const isEnvironment = text === "\\begin" || text === "\\end";

@@ -58,10 +58,22 @@ export function drawBore({
         continue;
       }
       const x = side < 0 ? middle - outer : middle + inner;
-      parts.push(element("rect", { x, y: from, width: outer - inner, height: to - from, fill: ink }));
+      parts.push(
+        element("rect", { x, y: from, width: outer - inner, height: to - from, fill: ink }),
+      );
       if (inRange(s.base) !== s.base) continue;
       const edge = middle + side * outer;
-      parts.push(path([[edge, to - shoe], [edge + side * shoe, to], [edge, to]], { fill: ink }, "Z"));
+      parts.push(
+        path(
+          [
+            [edge, to - shoe],
+            [edge + side * shoe, to],
+            [edge, to],
+          ],
+          { fill: ink },
+          "Z",
+        ),
+      );
     }
     // A liner begins at a hanger; a casing runs to the wellhead.
     if (s.kind === "liner" && inRange(s.top) === s.top)
@@ -76,6 +88,18 @@ export function drawBore({
           }),
         );
   }
+  // The bottom of the well.
+  for (const s of sections)
+    if (s.kind === "open hole" && inRange(s.base) === s.base)
+      parts.push(
+        path(
+          [
+            [middle - half(s.bore), y(s.base)],
+            [middle + half(s.bore), y(s.base)],
+          ],
+          { fill: "none", stroke: paleInk, "stroke-width": 1 },
+        ),
+      );
   return element("g", {}, parts.join(""));
 }
 
@@ -84,7 +108,7 @@ function ragged(x: number, from: number, to: number, side: number): readonly Poi
   const steps = Math.max(2, Math.round((to - from) / 5));
   const points: Point[] = [];
   for (let i = 0; i <= steps; i++) {
-    const out = i === 0 || i === steps ? 0 : [1.6, 0.3, 2.2, 0.8, 1.9, 0][i % 6] ?? 0;
+    const out = i === 0 || i === steps ? 0 : ([1.6, 0.3, 2.2, 0.8, 1.9, 0][i % 6] ?? 0);
     points.push([x + side * out, from + ((to - from) * i) / steps]);
   }
   return points;
@@ -94,11 +118,23 @@ function ragged(x: number, from: number, to: number, side: number): readonly Poi
 function packFill(left: number, right: number, top: number, bottom: number): string {
   const dots: string[] = [];
   for (let row = 0, y = top + 3; y <= bottom - 2; row++, y += 4)
-    for (let x = left + (row % 2 ? 4 : 2); x <= right - 2; x += 4) dots.push(`M${px(x)},${px(y)}h.01`);
+    for (let x = left + (row % 2 ? 4 : 2); x <= right - 2; x += 4)
+      dots.push(`M${px(x)},${px(y)}h.01`);
   return (
-    element("rect", { x: left, y: top, width: right - left, height: bottom - top, fill: "#d5dcde" }) +
+    element("rect", {
+      x: left,
+      y: top,
+      width: right - left,
+      height: bottom - top,
+      fill: "#d5dcde",
+    }) +
     (dots.length > 0
-      ? element("path", { d: dots.join(""), stroke: ink, "stroke-width": 1.3, "stroke-linecap": "round" })
+      ? element("path", {
+          d: dots.join(""),
+          stroke: ink,
+          "stroke-width": 1.3,
+          "stroke-linecap": "round",
+        })
       : "")
   );
 }

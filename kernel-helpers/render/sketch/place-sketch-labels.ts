@@ -40,11 +40,18 @@ export function placeSketchLabels({
     const y = middles[i] ?? 0;
     const [x0, y0] = each.from;
     const lines = wrapped[i] ?? [];
-    const leader = path([[x0 + 2, y0], [column - 10, y], [column - 4, y]], {
-      fill: "none",
-      stroke: each.isMark ? accent : paleInk,
-      "stroke-width": 0.6,
-    });
+    const leader = path(
+      [
+        [x0 + 2, y0],
+        [column - 10, y],
+        [column - 4, y],
+      ],
+      {
+        fill: "none",
+        stroke: each.isMark ? accent : paleInk,
+        "stroke-width": 0.6,
+      },
+    );
     const first = y - ((lines.length - 1) * lineHeight) / 2;
     return [
       leader,

@@ -66,7 +66,8 @@ export function wellSketch(sketch: WellSketch): string {
       ? 6
       : Math.ceil(Math.max(...tickTexts.map((text) => textWidth({ text, size }))) + 14);
   const middle = axis + 14 + (largest * pixelsPerDiameter) / 2;
-  const wallRight = (s: SketchSection): number => middle + ((s.outer ?? s.bore) * pixelsPerDiameter) / 2;
+  const wallRight = (s: SketchSection): number =>
+    middle + ((s.outer ?? s.bore) * pixelsPerDiameter) / 2;
   const outermost = Math.max(...sections.map(wallRight));
 
   const visible = sections.filter((s) => s.base > top && s.top < bottom);
@@ -83,12 +84,23 @@ export function wellSketch(sketch: WellSketch): string {
     ),
     ...(sketch.seabed === undefined
       ? []
-      : [{ text: "Seabed", from: [outermost + 4, atDepth(sketch.seabed)] as const, isMark: false }]),
+      : [
+          { text: "Seabed", from: [outermost + 4, atDepth(sketch.seabed)] as const, isMark: false },
+        ]),
   ];
   const column = outermost + 26;
   const content = [
-    ...(sketch.seabed === undefined ? [] : [seabed(atDepth(sketch.seabed), axis + 4, outermost + 4)]),
-    drawBore({ sections: visible, pack: sketch.pack ?? null, atDepth, inRange, middle, pixelsPerDiameter }),
+    ...(sketch.seabed === undefined
+      ? []
+      : [seabed(atDepth(sketch.seabed), axis + 4, outermost + 4)]),
+    drawBore({
+      sections: visible,
+      pack: sketch.pack ?? null,
+      atDepth,
+      inRange,
+      middle,
+      pixelsPerDiameter,
+    }),
     ...marks.map((mark) =>
       line(
         { x1: axis + 6, y1: atDepth(mark.depth), x2: outermost + 4, y2: atDepth(mark.depth) },
@@ -97,10 +109,19 @@ export function wellSketch(sketch: WellSketch): string {
     ),
     ...(sketch.hasDepthAxis === false
       ? []
-      : depthAxis(ticks.values.map(atDepth), tickTexts, { x: axis, plotTop, plotBottom, unit: sketch.depthUnit })),
+      : depthAxis(ticks.values.map(atDepth), tickTexts, {
+          x: axis,
+          plotTop,
+          plotBottom,
+          unit: sketch.depthUnit,
+        })),
     ...placeSketchLabels({ labels, column, right: width, plotTop, plotBottom }),
     label(
-      { text: scaleNote(pixelsPerDiameter / pixelsPerDepth, sketch.diameterInDepthUnits), x: 2, y: plotBottom + 16 },
+      {
+        text: scaleNote(pixelsPerDiameter / pixelsPerDepth, sketch.diameterInDepthUnits),
+        x: 2,
+        y: plotBottom + 16,
+      },
       { fill: paleInk, "font-size": 8.5 },
     ),
   ].join("");
@@ -114,7 +135,9 @@ function sectionAnchor(
   inRange: (depth: number) => number,
 ): number {
   const covered = all
-    .filter((other) => other !== s && other.bore > s.bore && other.base > s.top && other.base < s.base)
+    .filter(
+      (other) => other !== s && other.bore > s.bore && other.base > s.top && other.base < s.base,
+    )
     .map((other) => other.base);
   const [from, to] = [inRange(Math.max(s.top, ...covered)), inRange(s.base)];
   return s.kind === "open hole" ? (from + to) / 2 : to - (to - from) * 0.25;
@@ -129,7 +152,12 @@ function scaleNote(ratio: number, diameterInDepthUnits: number | undefined): str
 function depthAxis(
   ys: readonly number[],
   texts: readonly string[],
-  { x, plotTop, plotBottom, unit }: { x: number; plotTop: number; plotBottom: number; unit: string },
+  {
+    x,
+    plotTop,
+    plotBottom,
+    unit,
+  }: { x: number; plotTop: number; plotBottom: number; unit: string },
 ): readonly string[] {
   const thin = { stroke: paleInk, "stroke-width": 0.75 };
   return [
@@ -138,13 +166,22 @@ function depthAxis(
       line({ x1: x - 4, y1: y, x2: x, y2: y }, thin),
       label({ text: texts[i] ?? "", x: x - 7, y }, { "text-anchor": "end", fill: ink }),
     ]),
-    label({ text: unit, x: x - 7, y: plotTop - 16 }, { "text-anchor": "end", fill: ink, "font-weight": 600 }),
+    label(
+      { text: unit, x: x - 7, y: plotTop - 16 },
+      { "text-anchor": "end", fill: ink, "font-weight": 600 },
+    ),
   ];
 }
 
 function seabed(y: number, from: number, to: number): string {
   const strokes: string[] = [];
   for (let x = from + 5; x <= to; x += 6)
-    strokes.push(line({ x1: x, y1: y, x2: x - 4, y2: y + 5 }, { stroke: paleInk, "stroke-width": 0.5 }));
-  return element("g", {}, line({ x1: from, y1: y, x2: to, y2: y }, { stroke: ink, "stroke-width": 1 }) + strokes.join(""));
+    strokes.push(
+      line({ x1: x, y1: y, x2: x - 4, y2: y + 5 }, { stroke: paleInk, "stroke-width": 0.5 }),
+    );
+  return element(
+    "g",
+    {},
+    line({ x1: from, y1: y, x2: to, y2: y }, { stroke: ink, "stroke-width": 1 }) + strokes.join(""),
+  );
 }
