@@ -2,8 +2,10 @@ import { StudyError } from "../errors/index.js";
 import { typeJson, type Figure, type PlainJson } from "../study/index.js";
 import type { Context } from "./context.js";
 import type { Chart } from "./figures/chart.js";
-import { tableOf, thin } from "./tables.js";
+import { tableOf, telling, thin } from "./tables.js";
 import type { FigureView } from "./view.js";
+
+const MOST_ROWS = 40;
 
 /** A recorded figure: its values resolved and drawn, with the same data as a table beside it. */
 export function figureView(ctx: Context, item: Figure, charts: readonly Chart[]): FigureView {
@@ -29,7 +31,8 @@ export function figureView(ctx: Context, item: Figure, charts: readonly Chart[])
     values[name] = r.value;
   }
   const { drawing, columns } = found.draw(values as never, ctx.system);
-  const kept = thin(columns[0]?.cells.length ?? 0, 60);
+  const rows = telling(columns);
+  const kept = thin(rows.length, MOST_ROWS).map((i) => rows[i] ?? 0);
   return {
     ...base,
     drawing,

@@ -1,5 +1,6 @@
 import type { DeclaredMethod, DeclaredModel } from "../study/index.js";
 import { displayUnit, formatNumber, inUnit, isKind, kinds, type Kind } from "../units/index.js";
+import { equationOf } from "./equation-of.js";
 import { words, type Context } from "./context.js";
 import type { Link, MethodView, ModelView } from "./view.js";
 
@@ -27,7 +28,7 @@ export function methodView(
     id: m.id,
     revision: m.revision,
     title: m.title,
-    equation: `${m.result.symbol}=${m.tex}`,
+    equation: equationOf(m.result.symbol, m.tex),
     symbols: [
       { symbol: m.result.symbol, meaning: m.result.note, unit: siOf(m.result.kind) },
       ...Object.entries(m.inputs).map(([name, f]) => ({
@@ -61,6 +62,7 @@ export function modelView(
   ctx: Context,
   m: DeclaredModel,
   number: string,
+  applied: ReadonlySet<string>,
   methodNumber: (id: string) => string,
   usedIn: readonly Link[],
 ): ModelView {
@@ -71,10 +73,12 @@ export function modelView(
     revision: m.revision,
     title: m.title,
     about: m.about,
-    methods: m.uses.map((u) => ({
-      text: `${methodNumber(u.id)} ${ctx.resolver.declaration(u.id).title}`,
-      to: `method-${u.id}`,
-    })),
+    methods: m.uses
+      .filter((u) => applied.has(u.id))
+      .map((u) => ({
+        text: `${methodNumber(u.id)} ${ctx.resolver.declaration(u.id).title}`,
+        to: `method-${u.id}`,
+      })),
     tolerances: Object.entries(m.tolerances).map(([name, x]) => ({
       name: words(name),
       value: formatNumber(x),

@@ -1,4 +1,10 @@
-import { isStated, type AppliedUse, type Item, type StudyRecord } from "../study/index.js";
+import {
+  isStated,
+  type AppliedUse,
+  type DeclaredMethod,
+  type Item,
+  type StudyRecord,
+} from "../study/index.js";
 import { cautionsOf } from "./cautions.js";
 import { checkView } from "./checks.js";
 import { conclusionView } from "./conclusions.js";
@@ -6,9 +12,12 @@ import { Context } from "./context.js";
 import type { Chart } from "./figures/chart.js";
 import { figureView } from "./figure.js";
 import { assumptionView, inputView } from "./inputs.js";
+import { appliedBy, methodsApplied } from "./methods-applied.js";
 import { methodView, modelView } from "./method-views.js";
 import { openItems } from "./open-items.js";
-import { comparisonView, formulaView, objectView, stepView } from "./steps.js";
+import { comparisonView } from "./comparison-view.js";
+import { objectView } from "./object-view.js";
+import { formulaView, stepView } from "./steps.js";
 import { recordedTable } from "./tables.js";
 import type { Block, Link, PackageView, SectionView } from "./view.js";
 
@@ -24,16 +33,24 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
   for (const item of body.items)
     if ("use" in item)
       used.set(item.use, [...(used.get(item.use) ?? []), ctx.numbering.link(item.id)]);
-  const methods = body.declared.filter((d) => d.role === "method");
+  const applied = methodsApplied(body);
+  const methods = body.declared.filter(
+    (d): d is DeclaredMethod => d.role === "method" && applied.has(d.id),
+  );
   const models = body.declared.filter((d) => d.role === "model");
+  const composed = new Map(models.map((m) => [m.id, appliedBy(body, m.id)]));
   const numberOf = new Map([
     ...methods.map((d, i) => [d.id, `M${i + 1}`] as const),
     ...models.map((d, i) => [d.id, `P${i + 1}`] as const),
   ]);
-  const citations = new Map(body.references.map((r, i) => [r.id, String(i + 1)]));
+  const cited = new Set(
+    methods.flatMap((m) => [m.source.cite, ...m.checks.map((c) => c.from.cite)]),
+  );
+  const references = body.references.filter((r) => cited.has(r.id));
+  const citations = new Map(references.map((r, i) => [r.id, String(i + 1)]));
   const throughModels = (id: string): Link[] =>
     models
-      .filter((m) => m.uses.some((u) => u.id === id))
+      .filter((m) => (composed.get(m.id) ?? applied).has(id))
       .map((m) => ({ text: numberOf.get(m.id) ?? m.id, to: `method-${m.id}` }));
 
   const block = (item: Item): Block | null => {
@@ -66,7 +83,7 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
   const sections: SectionView[] = [
     {
       anchor: "section-opening",
-      title: "Before the sections",
+      title: "Common to all sections",
       about: null,
       blocks: blocksIn(null),
     },
@@ -123,6 +140,7 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
         ctx,
         m,
         numberOf.get(m.id) ?? "",
+        composed.get(m.id) ?? applied,
         (id) => numberOf.get(id) ?? "",
         used.get(m.id) ?? [],
       ),
@@ -131,7 +149,7 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
     comparisons: body.items.flatMap((i) => (i.op === "compare" ? [comparisonView(ctx, i)] : [])),
     uncertainty: uncertaintyText(record),
     open,
-    references: body.references.map((r) => ({
+    references: references.map((r) => ({
       number: citations.get(r.id) ?? "",
       anchor: `ref-${r.id}`,
       id: r.id,

@@ -64,7 +64,7 @@ export function showValue(
   system: DisplaySystem,
   unit?: string | null,
 ): ShownValue {
-  if (value === null) return { text: "not stated", unit: "" };
+  if (value === null) return { text: "none", unit: "" };
   if (isKind(type)) return showNumber(type, value as number, system, unit);
   switch (type.type) {
     case "oneOf":

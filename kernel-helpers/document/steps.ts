@@ -1,25 +1,12 @@
-import { formulaToTex, parseFormula } from "../method/formula/index.js";
-import type {
-  AppliedUse,
-  Comparison,
-  FormulaItem,
-  Item,
-  PlainJson,
-  Result,
-  TypeJson,
-} from "../study/index.js";
+import { formulaToTex, parseFormula } from "../method/index.js";
+import type { AppliedUse, FormulaItem, Item, Result, TypeJson } from "../study/index.js";
 import { isKind, kinds, type Kind } from "../units/index.js";
-import { formatNumber } from "../units/index.js";
-import { sayStop, split, words, type Context } from "./context.js";
-
-import { tableOfList } from "./tables.js";
+import { words, type Context } from "./context.js";
+import { equationOf, putInOf } from "./equation-of.js";
+import { saysOf, stopText } from "./item-texts.js";
 import { putIn } from "./tex-put-in.js";
 import { texNumber } from "./tex-number.js";
-import type { ComparisonView, ObjectView, Row, StepView, TableView } from "./view.js";
-
-const stopText = (result: Result): string | null =>
-  "stop" in result ? `No value (${sayStop(result.stop)}): ${result.because}.` : null;
-const says = (item: AppliedUse | FormulaItem): string[] => item.findings.map((f) => f.says);
+import type { Row, StepView } from "./view.js";
 
 function resultRow(ctx: Context, item: Item, symbol: string | null, meaning: string): Row | null {
   const r = ctx.resolver.ofItem(item);
@@ -61,15 +48,15 @@ export function stepView(ctx: Context, item: AppliedUse, methodNumber: string): 
     title: item.title,
     method: { text: `${methodNumber} ${m.title}`, to: `method-${m.id}` },
     cite: m.source.cite === "derivation" ? null : m.source.cite,
-    equation: `${symbol}=${m.tex}`,
+    equation: equationOf(symbol, m.tex),
     putIn:
       "stop" in item.result
         ? null
-        : `${symbol}=${putIn(m.tex, numbers)}${equals(item.result, item.type)}`,
+        : putInOf(symbol, putIn(m.tex, numbers), equals(item.result, item.type)),
     rows: ctx.rows(item.args, m.inputs),
     result: resultRow(ctx, item, symbol, m.result.note),
     stop: stopText(item.result),
-    findings: says(item),
+    findings: saysOf(item),
     usedBy: ctx.usedBy(item.id),
   };
 }
@@ -109,7 +96,7 @@ export function formulaView(ctx: Context, item: FormulaItem): StepView {
     rows: ctx.rows(item.args, fields),
     result: resultRow(ctx, item, symbol, item.title),
     stop: stopText(item.result),
-    findings: says(item),
+    findings: saysOf(item),
     usedBy: ctx.usedBy(item.id),
   };
 }
@@ -119,81 +106,3 @@ const nameTex = (name: string): string => {
   const base = head.length === 1 ? head : String.raw`\mathrm{${head}}`;
   return rest.length === 0 ? base : String.raw`${base}_{\mathrm{${rest.join(String.raw`\,`)}}}`;
 };
-
-/** An entity or a model run: arguments, single results as rows, lists as tables. */
-export function objectView(
-  ctx: Context,
-  item: AppliedUse,
-  methodNumber: string | null,
-): ObjectView {
-  const d = ctx.resolver.declaration(item.use);
-  const results: Row[] = [];
-  const tables: TableView[] = [];
-  if (d.role === "model" && !("stop" in item.result)) {
-    const values = item.result.value as { readonly [name: string]: PlainJson };
-    for (const [name, field] of Object.entries(d.results)) {
-      const value = values[name] ?? null;
-      const inner =
-        !isKind(field.type) && field.type.type === "optional" ? field.type.of : field.type;
-      const each = !isKind(inner) && inner.type === "list" ? inner.each : null;
-      if (each && !isKind(each) && each.type === "struct" && value !== null)
-        tables.push(
-          tableOfList(ctx, each.id, value as readonly PlainJson[], {
-            number: null,
-            anchor: `${ctx.numbering.anchor(item.id)}-${name}`,
-            caption: field.note,
-          }),
-        );
-      else
-        results.push(ctx.row(field.symbol, field.note || words(name), { type: field.type, value }));
-    }
-  }
-  return {
-    kind: d.role === "model" ? "run" : "object",
-    number: ctx.numbering.of(item.id),
-    anchor: ctx.numbering.anchor(item.id),
-    title: item.title,
-    method:
-      d.role === "model"
-        ? { text: `${methodNumber ?? ""} ${d.title}`.trim(), to: `method-${d.id}` }
-        : null,
-    about: d.role === "model" ? [] : [d.title],
-    rows: ctx.rows(item.args, d.inputs),
-    results,
-    tables,
-    stop: stopText(item.result),
-    findings: says(item),
-    diagnostics: Object.entries(item.diagnostics).map(([name, x]) => ({
-      name: words(name),
-      value: typeof x === "number" ? formatNumber(x) : x,
-    })),
-    usedBy: ctx.usedBy(item.id),
-  };
-}
-
-export function comparisonView(ctx: Context, item: Comparison): ComparisonView {
-  const side = (name: "main" | "alternate"): Row => {
-    const node = item.args[name] ?? { absent: true as const };
-    const title = "ref" in node ? ctx.resolver.item(node.ref).title : name;
-    return {
-      symbol: null,
-      meaning: title,
-      ...split(ctx.showNode(node, item.of)),
-      from: ctx.from(node),
-    };
-  };
-  const { result } = item;
-  return {
-    kind: "comparison",
-    number: ctx.numbering.of(item.id),
-    anchor: ctx.numbering.anchor(item.id),
-    title: item.title,
-    main: side("main"),
-    alternate: side("alternate"),
-    difference:
-      "stop" in result
-        ? `not defined: ${result.because}`
-        : `${formatNumber(100 * (result.value as number), 3)}\u00a0%`,
-    because: item.because,
-  };
-}

@@ -10,6 +10,8 @@ export interface Column {
   readonly unit: string;
   readonly numeric: boolean;
   readonly cells: readonly string[];
+  /** Where each value comes from. */
+  readonly links?: readonly (string | null)[];
 }
 
 /** A column of values of one type, formatted together. */
@@ -49,7 +51,9 @@ export function tableOf(
     kind: "table",
     ...parts,
     columns: columns.map(({ head, unit, numeric }) => ({ head, unit, numeric })),
-    rows: Array.from({ length }, (_, i) => columns.map((c) => c.cells[i] ?? "–")),
+    rows: Array.from({ length }, (_, i) =>
+      columns.map((c) => ({ text: c.cells[i] ?? "–", to: c.links?.[i] ?? null })),
+    ),
   };
 }
 
@@ -72,6 +76,42 @@ export function tableOfList(
     );
   return tableOf(columns, parts);
 }
+
+export type ObjectNode = Extract<Node, { fields: unknown }>;
+
+/** Objects stated in an argument as a table, each value linked to where it comes from. */
+export function tableOfNodes(
+  ctx: Context,
+  nodes: readonly ObjectNode[],
+  parts: Pick<TableView, "number" | "anchor" | "caption">,
+): TableView {
+  const struct = nodes[0]?.of ?? "";
+  const columns = Object.entries(ctx.resolver.fieldsOf(struct)).flatMap(([name, f]): Column[] => {
+    const here = nodes.map((n): Node => n.fields[name] ?? { absent: true });
+    if (here.every((n) => "absent" in n)) return [];
+    const values = here.map((n) => {
+      const r = ctx.resolver.resolve(n, f.type);
+      return "stop" in r ? undefined : r.value;
+    });
+    return [
+      {
+        ...column(ctx, words(name), f.type, values),
+        links: here.map((n) => ctx.from(n)?.to ?? null),
+      },
+    ];
+  });
+  return tableOf(columns, parts);
+}
+
+/** Rows that tell something: the ends, and those that differ from a neighbour. */
+export const telling = (columns: readonly Column[]): number[] => {
+  const length = columns[0]?.cells.length ?? 0;
+  const same = (i: number, k: number): boolean =>
+    columns.slice(1).every((c) => c.cells[i] === c.cells[k]);
+  return Array.from({ length }, (_, i) => i).filter(
+    (i) => i === 0 || i === length - 1 || !same(i, i - 1) || !same(i, i + 1),
+  );
+};
 
 /** At most `most` rows, the first and the last among them, spread evenly. */
 export function thin(length: number, most: number): number[] {

@@ -105,6 +105,11 @@ export interface ComparisonView {
   readonly difference: string;
   readonly because: string;
 }
+export interface TableCell {
+  readonly text: string;
+  /** Where the value comes from. */
+  readonly to: string | null;
+}
 export interface TableView {
   readonly kind: "table";
   readonly number: string | null;
@@ -115,7 +120,7 @@ export interface TableView {
     readonly unit: string;
     readonly numeric: boolean;
   }[];
-  readonly rows: readonly (readonly string[])[];
+  readonly rows: readonly (readonly TableCell[])[];
 }
 export interface Series {
   readonly label: string;

@@ -59,5 +59,10 @@ export const entityUse = (struct: Struct): Use => ({
   inputs: struct.fields,
   output: struct,
   uses: [],
-  apply: (args): Outcome => ({ live: struct.build(args), findings: [], diagnostics: {} }),
+  apply: (args): Outcome => ({
+    live: struct.build(args),
+    findings: [],
+    looked: [],
+    diagnostics: {},
+  }),
 });

@@ -45,7 +45,10 @@ export interface MethodParts<S extends Shape, K extends Kind> {
   /** Raised whenever a result can change. */
   readonly revision: number;
   readonly title: string;
-  /** The right-hand side; the output symbol stands before it. */
+  /**
+   * The right-hand side; the output symbol stands before it. A relation that is solved for its output
+   * is written whole, behind `x:\\ ` with x the symbol it is solved for.
+   */
   readonly tex: string;
   readonly source: Source;
   readonly inputs: Fields<S>;
@@ -145,6 +148,7 @@ export function method<S extends Shape, K extends Kind>(parts: MethodParts<S, K>
   const apply = (args: Values<S>): Outcome => ({
     live: value(args),
     findings: findings(args),
+    looked: [],
     diagnostics: {},
   });
   const call = (args: Entered<S>): Quantity<K> => value(args as Values<S>) as Quantity<K>;

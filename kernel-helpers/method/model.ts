@@ -69,6 +69,7 @@ export function model<I extends string, S extends Shape, R extends Shape>(
     assertFields(inputs, args, parts.id);
     const watch = new RangeWatch();
     const advice = new Set<string>();
+    const looked = new Set<string>();
     const diagnostics: Record<string, number | string> = {};
     const look: Look = Object.assign(
       <A extends Shape, K extends Kind>(
@@ -76,6 +77,7 @@ export function model<I extends string, S extends Shape, R extends Shape>(
         a: Bare<A>,
         depth?: number,
       ): number => {
+        looked.add(method.id);
         watch.look(method.id, method.rules, a as never, depth ?? null);
         return method.si(a);
       },
@@ -91,6 +93,7 @@ export function model<I extends string, S extends Shape, R extends Shape>(
         ...watch.findings(),
         ...[...advice].map((says): Finding => ({ code: "advice", by: parts.id, says })),
       ],
+      looked: [...looked].sort(),
       diagnostics,
     };
   };

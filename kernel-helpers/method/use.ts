@@ -14,6 +14,8 @@ export const isStop = (x: unknown): x is Stop =>
 export interface Outcome {
   readonly live: unknown;
   readonly findings: readonly Finding[];
+  /** Ids of the methods a model evaluated on its converged state. */
+  readonly looked: readonly string[];
   /** How a solver fared: iterations, residuals. Not compared in replay. */
   readonly diagnostics: { readonly [name: string]: number | string };
 }

@@ -9,6 +9,7 @@ export interface Done {
   readonly live: unknown;
   readonly result: Result;
   readonly findings: readonly Finding[];
+  readonly looked: readonly string[];
   readonly diagnostics: { readonly [name: string]: number | string };
 }
 
@@ -31,14 +32,21 @@ export function evaluate(
         decode(f.kind, args[n] ?? { absent: true }, get, `${id}.${n}`),
       ]),
     );
-    const { live, findings, diagnostics } = use.apply(values as never);
+    const { live, findings, looked, diagnostics } = use.apply(values as never);
     const result: Result = isStop(live)
       ? { stop: live.stop, because: live.because }
       : { value: plain(use.output, live, id) };
-    return { type: use.output, live, result, findings, diagnostics };
+    return { type: use.output, live, result, findings, looked, diagnostics };
   } catch (e) {
     if (!(e instanceof Blocked)) throw e;
     const stop: Stop = { stop: "blocked", because: `"${e.by}" ended without a value` };
-    return { type: use.output, live: stop, result: stop, findings: [], diagnostics: {} };
+    return {
+      type: use.output,
+      live: stop,
+      result: stop,
+      findings: [],
+      looked: [],
+      diagnostics: {},
+    };
   }
 }

@@ -8,7 +8,7 @@ import type { Sense } from "./item.js";
 // and samples treat them like any declared method.
 
 const bare = { revision: 1, uses: [], role: "method" as const };
-const value = (live: unknown): Outcome => ({ live, findings: [], diagnostics: {} });
+const value = (live: unknown): Outcome => ({ live, findings: [], looked: [], diagnostics: {} });
 
 /** An expression an analyst made up, checked for dimensions against the kind it is said to give. */
 export function formulaUse(

@@ -69,6 +69,8 @@ export interface AppliedUse extends Applied {
   readonly op: "entity" | "step" | "run";
   readonly use: string;
   readonly revision: number;
+  /** Methods that a model evaluated: which of those it lists took part. */
+  readonly looked: readonly string[];
   readonly diagnostics: { readonly [name: string]: number | string };
 }
 export interface FormulaItem extends Applied {

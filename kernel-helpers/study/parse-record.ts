@@ -98,6 +98,7 @@ const item = z.union([
     use: z.string(),
     revision: z.number().int(),
     type: typeOf,
+    looked: z.array(z.string()),
     diagnostics: named(z.union([finite, z.string()])),
   }),
   z.strictObject({

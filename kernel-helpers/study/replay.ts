@@ -100,7 +100,14 @@ function evaluateItem(
   if (isStated(item) && item.form !== "object") {
     const type = liveType(item.type, registry);
     const live = set ?? item.result.value;
-    return { type, live, result: { value: live as PlainJson }, findings: [], diagnostics: {} };
+    return {
+      type,
+      live,
+      result: { value: live as PlainJson },
+      findings: [],
+      looked: [],
+      diagnostics: {},
+    };
   }
   return evaluate(useOf(item, registry), item.id, item.args, get);
 }

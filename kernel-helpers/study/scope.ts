@@ -343,6 +343,7 @@ export class Scope {
         live: value,
         result: { value },
         findings: [],
+        looked: [],
         diagnostics: {},
       };
       return this.keep(
@@ -364,7 +365,7 @@ export class Scope {
       const result = { value: b as string };
       return this.keep(
         { ...common, form: "choice", type: typeJson(type), result },
-        { type, live: b, result, findings: [], diagnostics: {} },
+        { type, live: b, result, findings: [], looked: [], diagnostics: {} },
       );
     }
     const use = entityUse(type);
@@ -411,6 +412,7 @@ export class Scope {
         type: typeJson(use.output),
         result: done.result,
         findings: [...done.findings, ...this.sheet.known.findings(args, id)],
+        looked: done.looked,
         diagnostics: done.diagnostics,
       },
       done,
