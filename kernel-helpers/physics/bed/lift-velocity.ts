@@ -1,6 +1,7 @@
 import { method, oneOf } from "../../method/index.js";
 import { cP, kgpm3, m, micrometre, mm, mmps, mps, rad } from "../../units/index.js";
 import { holdsGravity } from "../gravity.js";
+import { refuseBuoyant } from "../refuse.js";
 import { risingRoot } from "../rising-root.js";
 import { liftInputs } from "./lift-inputs.js";
 import { packLaws, type PackLaw } from "./pack-laws.js";
@@ -20,6 +21,7 @@ interface Lift {
 }
 
 function lift({ d, eps, rho, rhoS, mu, D, theta, law }: Lift): number {
+  refuseBuoyant("lift-velocity", rhoS, rho);
   const weight = packWeightGradient.si({ eps, rho, rhoS, theta });
   if (weight === 0) return 0;
   const gradient = packLaws[law].si;

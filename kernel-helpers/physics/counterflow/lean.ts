@@ -1,5 +1,6 @@
 import { InputError } from "../../errors/index.js";
 import { broadsideCylinder } from "../drag/broadside-cylinder-table.js";
+import { refuseTooWide } from "../refuse.js";
 import type { Lean } from "./rod-balance.js";
 import type { Rod } from "./rod-inputs.js";
 import { rodLeanLimit } from "./rod-lean-limit.js";
@@ -21,6 +22,7 @@ const SLACK = 1e-9;
 /** What a leaning rod blocks and shows; `exponent` of sin t is 1 for its projected area, 3 for the cross-flow principle. */
 export function leanOf(where: string, rod: Rod, t: number, exponent: 1 | 3): Lean {
   const { d, D, L } = rod;
+  refuseTooWide(where, d, D);
   const limit = rodLeanLimit.si({ d, D, L });
   if (t > limit + SLACK)
     throw new InputError({

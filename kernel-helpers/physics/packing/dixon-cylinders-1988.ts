@@ -1,7 +1,7 @@
 import { method, positive } from "../../method/index.js";
 import { m } from "../../units/index.js";
 import { bore } from "../fields.js";
-import { bedVoidage, fittingRatio, lambda, lambdaNote } from "./voidage-inputs.js";
+import { bedVoidage, fittingRatio } from "./voidage-inputs.js";
 
 /**
  * Mean voidage of equal full cylinders, about as long as wide, poured into a bore.
@@ -26,7 +26,6 @@ export const dixonCylinders = method({
     },
     D: bore,
   },
-  within: { lambda: { of: lambda, range: [0, 1], stated: true, note: lambdaNote } },
   output: bedVoidage,
   compute: (a) => {
     const k = fittingRatio("dixon-cylinders-1988", a);

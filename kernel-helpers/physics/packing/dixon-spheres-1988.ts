@@ -1,13 +1,6 @@
 import { method } from "../../method/index.js";
 import { m } from "../../units/index.js";
-import {
-  bedVoidage,
-  fittingRatio,
-  lambda,
-  lambdaNote,
-  sphereBedFamily,
-  sphereBedInputs,
-} from "./voidage-inputs.js";
+import { bedVoidage, fittingRatio, sphereBedFamily, sphereBedInputs } from "./voidage-inputs.js";
 
 /**
  * Mean voidage of equal spheres poured into a bore.
@@ -25,7 +18,6 @@ export const dixonSpheres = method({
   tex: String.raw`\begin{cases}0.4+0.05\lambda+0.412\lambda^2&\lambda\le0.5\\0.528+2.464(\lambda-0.5)&\lambda\le0.536\\1-0.667\,\lambda^3(2\lambda-1)^{-0.5}&\lambda>0.536\end{cases}\quad\lambda=\frac dD`,
   source: { cite: "dixon1988", where: "correlations for spheres" },
   inputs: sphereBedInputs,
-  within: { lambda: { of: lambda, range: [0, 1], stated: true, note: lambdaNote } },
   output: bedVoidage,
   compute: (a) => {
     const k = fittingRatio("dixon-spheres-1988", a);

@@ -19,8 +19,6 @@ interface Pair {
   readonly d: number;
   readonly D: number;
 }
-export const lambda = ({ d, D }: Pair): number => d / D;
-export const lambdaNote = "grain to bore diameter";
 
 /** d/D, refused when the grain does not fit the bore. */
 export function fittingRatio(where: string, { d, D }: Pair): number {

@@ -1,13 +1,6 @@
 import { method } from "../../method/index.js";
 import { m } from "../../units/index.js";
-import {
-  bedVoidage,
-  fittingRatio,
-  lambda,
-  lambdaNote,
-  sphereBedFamily,
-  sphereBedInputs,
-} from "./voidage-inputs.js";
+import { bedVoidage, fittingRatio, sphereBedFamily, sphereBedInputs } from "./voidage-inputs.js";
 
 /**
  * Mean voidage of equal spheres poured into a bore (loose random packing).
@@ -24,7 +17,6 @@ export const zouYuLoose = method({
   tex: String.raw`\begin{cases}0.4+0.01\left(e^{10.686\lambda}-1\right)&\lambda\le0.256\\0.846-1.898\lambda+2.725\lambda^2&\lambda\le0.538\\1-0.667\,\lambda^3(2\lambda-1)^{-0.5}&\lambda>0.538\end{cases}\quad\lambda=\frac dD`,
   source: { cite: "zou1995", where: "loose packing" },
   inputs: sphereBedInputs,
-  within: { lambda: { of: lambda, range: [0, 1], stated: true, note: lambdaNote } },
   output: bedVoidage,
   compute: (a) => {
     const k = fittingRatio("zou-yu-loose-1995", a);

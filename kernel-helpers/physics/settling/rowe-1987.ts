@@ -1,5 +1,6 @@
 import { method } from "../../method/index.js";
 import { m } from "../../units/index.js";
+import { refuseTooWide } from "../refuse.js";
 import {
   exponentFamily,
   exponentInputs,
@@ -12,7 +13,7 @@ import {
  *
  * n = 2.35 (2 + 0.175 Re^0.75)/(1 + 0.175 Re^0.75), Re = ρv_td/µ of one grain. Wide bore: d and D enter
  * the advised range only, Ar takes no part. 1e-3 < Re < 3e4; solids 4 to 55 %. Rowe (1987), a curve
- * through Richardson and Zaki's limits, within 4 % of them.
+ * through Richardson and Zaki's limits, within 4 % of them. Throws InputError for d ≥ D.
  */
 export const rowe = method({
   id: "rowe-1987",
@@ -24,7 +25,10 @@ export const rowe = method({
   inputs: { ...exponentInputs, Re: { ...exponentInputs.Re, range: [1e-3, 3e4] } },
   within: { "d/D": grainToBore },
   output: exponentOutput,
-  compute: ({ Re }) => (2.35 * (2 + 0.175 * Re ** 0.75)) / (1 + 0.175 * Re ** 0.75),
+  compute: ({ Re, d, D }) => {
+    refuseTooWide("rowe-1987", d, D);
+    return (2.35 * (2 + 0.175 * Re ** 0.75)) / (1 + 0.175 * Re ** 0.75);
+  },
   checks: [
     {
       from: { cite: "rowe1987", where: "limits 4.7 and 2.35" },
