@@ -1,4 +1,5 @@
 export * from "./chart-use.js";
+export * from "./columns-of.js";
 export * from "./declared.js";
 export * from "./edges-of.js";
 export * from "./item.js";

@@ -1,5 +1,8 @@
 import { StudyError } from "../errors/index.js";
 import { typeName, type Type } from "../method/index.js";
+import { frame } from "../tables/index.js";
+import type { DisplaySystem } from "../units/index.js";
+import { columnsOf } from "./columns-of.js";
 import { encode } from "./encode.js";
 import { decode, partType, type Get } from "./decode.js";
 import { Blocked, type Done } from "./evaluate.js";
@@ -20,7 +23,10 @@ interface Held {
 /** The items of one study, with the versions they saw: what is stale, what is gone, what would loop. */
 export class Ledger {
   private readonly held = new Map<string, Held>();
-  constructor(private readonly turn: () => number) {}
+  constructor(
+    private readonly turn: () => number,
+    private readonly display: DisplaySystem,
+  ) {}
 
   items(): Item[] {
     return [...this.held.values()].map((h) => h.item);
@@ -104,11 +110,15 @@ export class Ledger {
       return this.ref(id, partType(type, step, id), [...path, step]);
     };
     const ledger = this as Ledger;
+    const last = path.at(-1);
+    const name = typeof last === "string" ? last : id;
     const handle: object = {
       __ref: type,
       id,
       path,
       at: part,
+      columns: () => columnsOf(type, (handle as Ref<T>).value, this.display, name),
+      frame: () => frame(columnsOf(type, (handle as Ref<T>).value, this.display, name)),
       in: (unit: { symbol: string }) => ({ shown: handle, unit: unit.symbol }),
       get value(): unknown {
         try {

@@ -21,7 +21,7 @@ const realm = globalThis as unknown as {
 export class Study extends Scope {
   readonly facts: StudyFacts;
   constructor(options: StudyOptions) {
-    super(new WorkSheet(new Ledger(() => realm[TURN] ?? 0)), null);
+    super(new WorkSheet(new Ledger(() => realm[TURN] ?? 0, options.display ?? "SI")), null);
     this.facts = { checked: null, approved: null, disclaimer: null, display: "SI", ...options };
     (realm[STUDIES] ??= new Map()).set(options.id, this);
   }

@@ -12,6 +12,7 @@ import type {
   Value,
   Along,
 } from "../method/index.js";
+import type { Column, Frame } from "../tables/index.js";
 import type { Kind, QuantityInput, Unit } from "../units/index.js";
 import type { Path } from "./node.js";
 
@@ -23,6 +24,10 @@ export interface Ref<T> {
   readonly value: Value<T>;
   /** A part: a field by name, a member by index, a profile at a depth (which may itself be a Ref). */
   readonly at: At<T>;
+  /** A profile, a list or a result of profiles as columns with units, for `toCsv` or to compute with. */
+  columns(): Column[];
+  /** The same as a danfojs frame, loaded when first asked for. */
+  frame(): Promise<Frame>;
   /** For texts: the same value, shown in a unit of the author's choice. */
   readonly in: T extends Kind ? (unit: Unit<T>) => Shown : never;
 }

@@ -6,9 +6,13 @@ import { registry } from "./example.js";
 
 const file = new URL("../golden/record-schema-1.json", import.meta.url);
 const now = () =>
-  buildExample("golden").s.record({ at: "2026-01-01T00:00:00.000Z", versions: { stillwell: "golden" } });
+  buildExample("golden").s.record({
+    at: "2026-01-01T00:00:00.000Z",
+    versions: { stillwell: "golden" },
+  });
 // `UPDATE_GOLDEN=1 npm test` writes it anew: only for a schema that has not been published yet.
-if (process.env["UPDATE_GOLDEN"] === "1") writeFileSync(file, `${JSON.stringify(now(), null, 1)}\n`);
+if (process.env["UPDATE_GOLDEN"] === "1")
+  writeFileSync(file, `${JSON.stringify(now(), null, 1)}\n`);
 const golden = JSON.parse(readFileSync(file, "utf8")) as unknown;
 
 describe("the golden record of schema 1", () => {

@@ -6,6 +6,7 @@ import {
   Study,
   type StudyRecord,
 } from "../../kernel-helpers/study/index.js";
+import { toCsv } from "../../kernel-helpers/tables/index.js";
 import { cP, kgpm3, m, mm, MPa } from "../../kernel-helpers/units/index.js";
 import { buildExample } from "./build-example.js";
 import { Fluid, Inflow, outflow, registry, reynolds } from "./example.js";
@@ -306,5 +307,34 @@ describe("a foreign record", () => {
     const { failed, compared } = replay(body, newer);
     expect(failed.map((f) => [f.id, f.error.code])).toEqual([["Re", "revised"]]);
     expect(compared).toBe(10);
+  });
+});
+
+describe("results as tables", () => {
+  it("a profile becomes columns of depth and value, with units in their heads", () => {
+    const { q } = buildExample("tables");
+    expect(
+      q
+        .at("pressure")
+        .columns()
+        .map((c) => [c.head, c.unit, c.values.length]),
+    ).toEqual([
+      ["measured depth", "m MD", 3],
+      ["pressure", "MPa", 3],
+    ]);
+    expect(q.columns()).toEqual(q.at("pressure").columns());
+  });
+  it("a frame holds the same numbers, and CSV is written by our own writer", async () => {
+    const { q } = buildExample("frames");
+    const frame = await q.at("pressure").frame();
+    expect(frame.columns).toEqual(["measured depth [m MD]", "pressure [MPa]"]);
+    expect(frame.column("measured depth [m MD]")).toEqual([0, 3000, 3640]);
+    expect(toCsv({ columns: q.at("pressure").columns() })).toMatch(
+      /^measured depth \[m MD\],pressure \[MPa\]\r\n0,2\r\n/,
+    );
+  });
+  it("a single number is no table", () => {
+    const { rho } = buildExample("number");
+    expect(() => rho.columns()).toThrow(expect.objectContaining({ code: "no-table" }));
   });
 });
