@@ -64,25 +64,32 @@ export function sayDiagnostic({ chain }: Diagnostic): string {
 const NOT_ASSIGNABLE =
   /^(?:Type|Argument of type) '(.*)' is not assignable to (?:type|parameter of type) '(.*)'\.$/s;
 
-/** Two kinds of quantity that differ: the brand's own names stand at the end of the chain. */
+// A quantity, a reference to a recorded one, what stands for either, and a unit.
+const OF_KINDS = /^(Quantity|Ref|Wired|Unit)<(.*)>$/s;
+
+/** Two kinds that differ: their names alone stand at the end of the chain. */
 function sayKinds(last: string, chain: readonly string[]): string | null {
-  if (!chain.some((link) => link.includes("__kind"))) return null;
+  if (!chain.some((link) => /__kind|\b(Quantity|Ref|Wired|Unit)<"/.test(link))) return null;
   const [, got = "", wanted = ""] = NOT_ASSIGNABLE.exec(last) ?? [];
   const [has, wants] = [kindsIn(got), kindsIn(wanted)];
   return has && wants ? `expected ${sayAny(wants)}, got ${sayAny(has)}` : null;
 }
 
-/** Something that is no quantity where one is expected. */
+/** Something that is no quantity where one is expected, or only stands for one. */
 function sayNoUnit(chain: readonly string[]): string | null {
   for (const link of chain) {
     const [, got = "", wanted = ""] = NOT_ASSIGNABLE.exec(link) ?? [];
-    const wants = /^Quantity<(.*)>$/.exec(wanted)?.[1];
-    const kindsWanted = wants === undefined ? null : kindsIn(wants);
-    if (!kindsWanted || got.includes("Quantity<")) continue;
-    const [kind] = kindsWanted;
-    const makers = kind ? unitNames(kind).join(", ") : "";
+    const wants = kindsIn(OF_KINDS.exec(wanted)?.[2] ?? "");
+    if (!wants) continue;
+    const [, what, of = ""] = OF_KINDS.exec(got) ?? [];
+    const has = kindsIn(of);
+    if (what === "Ref" && has)
+      return `expected ${sayAny(wants)} itself, got a reference to ${sayAny(has)}; its value is in .value`;
+    if (what === "Unit") return `expected ${sayAny(wants)}, got a unit; it is called with a number`;
+    if (has) continue;
+    const makers = unitNames(wants).join(", ");
     const bare = /^-?[\d.]+$|^number$/.test(got) ? "a number without a unit" : shorten(got);
-    return `expected ${sayAny(kindsWanted)}, got ${bare}${makers ? `; units: ${makers}` : ""}`;
+    return `expected ${sayAny(wants)}, got ${bare}${makers ? `; units: ${makers}` : ""}`;
   }
   return null;
 }
@@ -93,7 +100,7 @@ function sayMissing(last: string): string | null {
   );
   if (one?.[1] !== undefined) {
     const name = one[1].replace(/\W/g, "\\$&");
-    const kind = new RegExp(`\\b${name}: Quantity<"(\\w+)">`).exec(one[2] ?? "")?.[1];
+    const kind = new RegExp(`\\b${name}: (?:Quantity|Wired)<"(\\w+)">`).exec(one[2] ?? "")?.[1];
     return `${one[1]} is missing${isKind(kind) ? ` (${kinds[kind].words})` : ""}`;
   }
   const more = /is missing the following properties from type '.*': (.*)$/s.exec(last)?.[1];
@@ -121,7 +128,7 @@ function kindsIn(type: string): Kind[] | null {
 
 const sayAny = (of: readonly Kind[]): string => of.map((kind) => kinds[kind].words).join(" or ");
 
-const unitNames = (kind: Kind): string[] =>
+const unitNames = ([kind]: readonly Kind[]): string[] =>
   Object.entries(units)
     .filter(([, x]) => typeof x === "function" && "kind" in x && x.kind === kind)
     .map(([name]) => name)

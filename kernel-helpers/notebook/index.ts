@@ -1,7 +1,6 @@
 export type { CellOutput, MimeBundle } from "./cell-outputs.js";
 export * from "./describe-failure.js";
 export * from "./display-system.js";
-export type { Ipynb, IpynbCell } from "./ipynb.js";
 export * from "./kernel-client.js";
 export type { KernelProcessParts } from "./kernel-process.js";
 export * from "./kernel-command.js";

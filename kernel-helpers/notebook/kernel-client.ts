@@ -68,6 +68,10 @@ export class KernelClient {
   get folder(): string {
     return this.kernel.folder;
   }
+  /** What the kernel wrote last outside the protocol, such as why it broke off. */
+  get lastWords(): string {
+    return this.kernel.lastWords;
+  }
   /** How the kernel ended, or null while it runs. */
   get ended(): string | null {
     return this.kernel.ended;

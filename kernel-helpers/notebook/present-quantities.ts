@@ -53,7 +53,10 @@ function rowsOf(
   known: Extract<KnownType, { fields: unknown }>,
   path: string,
 ): Row[] {
-  return Object.entries(value).flatMap(([key, x]): Row[] => {
+  return Object.entries(Object.getOwnPropertyDescriptors(value)).flatMap(([key, own]): Row[] => {
+    // To look at a value runs none of its code, so an accessor is left alone.
+    if (own.enumerable !== true || !("value" in own)) return [];
+    const x: unknown = own.value;
     const name = path + key;
     const of = Object.hasOwn(known.fields, key) ? known.fields[key] : undefined;
     if (typeof x === "function") return [];

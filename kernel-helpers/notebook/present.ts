@@ -4,12 +4,14 @@ import type { KnownType } from "./known-type.js";
 import { presentDeclared } from "./present-declared.js";
 import { presentFrame } from "./present-frame.js";
 import { presentQuantities } from "./present-quantities.js";
+import { presentReference } from "./present-reference.js";
 import { presentSelfShown } from "./present-self-shown.js";
 import type { Presenter } from "./presenter.js";
 
 /** The first that claims a value shows it. */
 const presenters: readonly Presenter[] = [
   presentSelfShown,
+  presentReference,
   presentQuantities,
   presentDeclared,
   presentFrame,

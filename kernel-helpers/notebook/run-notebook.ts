@@ -107,9 +107,10 @@ function reasonOf(
   kernel: KernelClient,
   limitMs: number | null,
 ): Pick<FailedCell, "ename" | "evalue" | "traceback" | "line"> {
+  const fatal = /^FATAL ERROR: (.*)$/m.exec(kernel.lastWords)?.[1];
   const own = {
     timeout: `the cell was stopped after its limit of ${(limitMs ?? 0) / 1000} s`,
-    died: `the kernel ${kernel.ended ?? "ended"}`,
+    died: `the kernel ${kernel.ended ?? "ended"}${fatal ? ` (${fatal})` : ""}`,
     interrupted: "the run was interrupted",
   };
   if (status === "timeout" || status === "died" || status === "interrupted")

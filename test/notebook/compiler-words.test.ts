@@ -34,6 +34,31 @@ describe("a diagnostic in the analyst's terms", () => {
       ),
     ).toBe("expected a length or a true vertical depth, got a temperature");
   });
+  it("names the kinds of references and units too", () => {
+    const last = `Type '"pressure"' is not assignable to type '"length"'.`;
+    for (const brand of ["Ref", "Unit"])
+      expect(
+        say(`Type '${brand}<"pressure">' is not assignable to type '${brand}<"length">'.`, last),
+      ).toBe("expected a length, got an absolute pressure");
+  });
+  it("says when a reference or a unit stands where a quantity must", () => {
+    const given = (type: string): string =>
+      say(
+        `Type '${type}' is not assignable to type 'Quantity<"length">'.`,
+        `Type '${type}' is not assignable to type 'number'.`,
+      );
+    expect(given('Ref<"pressure">')).toBe(
+      "expected a length itself, got a reference to an absolute pressure; its value is in .value",
+    );
+    expect(given('Unit<"length">')).toBe(
+      "expected a length, got a unit; it is called with a number",
+    );
+  });
+  it("asks for a unit also where a reference would do", () => {
+    expect(say(`Type 'number' is not assignable to type 'Wired<"length">'.`)).toMatch(
+      /^expected a length, got a number without a unit; units: /,
+    );
+  });
   it("does not take a text that is called like a kind for one", () => {
     expect(say(`Type '"pressure"' is not assignable to type '"length"'.`)).toBe(
       `Type '"pressure"' is not assignable to type '"length"'`,

@@ -66,6 +66,65 @@ describe("a value that brings its own display", () => {
   });
 });
 
+describe("a reference to a recorded item", () => {
+  const reference = (type: unknown, value: () => unknown, path: unknown[] = []) => ({
+    __ref: type,
+    id: "bed",
+    path,
+    get value() {
+      return value();
+    },
+  });
+  it("shows which item it is and the value it has now", async () => {
+    let now = mm(5);
+    const ref = reference("length", () => now);
+    expect(await plain(ref)).toBe("bed: 5.000 mm (length)");
+    now = mm(6);
+    expect(await plain(ref)).toBe("bed: 6.000 mm (length)");
+  });
+  it("reads the fields of a struct, lists and profiles by their declared types", async () => {
+    const struct = {
+      type: "struct",
+      fields: {
+        p: { kind: "pressure" },
+        along: { kind: { type: "profile", of: "velocity" } },
+        gap: { kind: { type: "optional", of: "length" } },
+      },
+    };
+    const value = { p: psi(14.7), along: { depth: [ft(1)], value: [2] }, gap: null };
+    const text = bare(await plain(reference(struct, () => value, ["result", 1])));
+    expect(text.split("\n").map((row) => row.split(/ {2,}/).join(" | "))).toEqual([
+      "bed › result › 1: ",
+      "p | 0.1014 MPa | absolute pressure",
+      "along.depth | [0.3048] m MD | measured depth",
+      "along.value | [2.000] m/s | velocity",
+      "gap | null",
+    ]);
+    expect(await plain(reference({ type: "list", each: "length" }, () => [mm(5)]))).toBe(
+      "bed: [5.000] mm (length)",
+    );
+  });
+  it("says why there is no value, and does not fail", async () => {
+    const stopped = reference("length", () => {
+      throw new Error("bed: no length");
+    });
+    expect(await plain(stopped)).toBe("bed: bed: no length");
+  });
+});
+
+it("to show a value runs none of its accessors", async () => {
+  let looks = 0;
+  const value = {
+    q: mm(5),
+    get trap() {
+      return (looks += 1);
+    },
+  };
+  const known = { fields: { q: length, trap: { kind: "mass" } } } as const;
+  expect(await plain(value, known)).toBe("q  5.000 mm  length");
+  expect(looks).toBe(0);
+});
+
 describe("a declared method", () => {
   it("is a card with its equation, inputs, ranges and source", async () => {
     const bundle = await present(ergun);

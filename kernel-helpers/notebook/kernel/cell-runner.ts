@@ -1,4 +1,3 @@
-import { join } from "node:path";
 import { refusal, type ErrorReport } from "../compiler-words.js";
 import { present } from "../present.js";
 import { thrownReport } from "../thrown-words.js";
@@ -9,6 +8,8 @@ import type { Engine, Ran } from "./tslab.js";
 export interface CellRunnerParts {
   readonly engine: Engine;
   readonly output: LiveOutput;
+  /** The folder that drafts of studies are written to after each cell. */
+  readonly drafts: string;
   /** True for a line of a stack that belongs to the machinery, not to the analyst. */
   readonly isOurs: (frame: string) => boolean;
 }
@@ -32,9 +33,7 @@ export class CellRunner {
       const { line, ...content } = report;
       output.publish("error", content, line === null ? {} : { line });
     }
-    writeDrafts(process.env["STILLWELL_DRAFTS"] ?? join(process.cwd(), ".stillwell"), (says) =>
-      output.write("stderr", says),
-    );
+    writeDrafts(this.parts.drafts, (says) => output.write("stderr", says));
     output.flush();
     return report;
   }

@@ -18,6 +18,8 @@ import { endWithStarter } from "./watchdog.js";
 export async function main(file: string | undefined): Promise<void> {
   const endpoints = readEndpoints(file);
   endWithStarter(process.env["STILLWELL_KERNEL_FOLDER"] ?? null);
+  // A kernel that a cell starts has a folder of its own or none.
+  delete process.env["STILLWELL_KERNEL_FOLDER"];
   const root = packageRoot();
   resolveFromPackage("stillwell", root);
   dropLoaderWarning();
@@ -35,7 +37,13 @@ export async function main(file: string | undefined): Promise<void> {
   const here = dirname(fileURLToPath(import.meta.url));
   const isOurs = (frame: string): boolean =>
     /\(?node:/.test(frame) || frame.includes(here) || engine.isOwnFrame(frame);
-  const runner = new CellRunner({ engine, output, isOurs });
+  const runner = new CellRunner({
+    engine,
+    output,
+    // Fixed now: a cell may change the working folder.
+    drafts: process.env["STILLWELL_DRAFTS"] ?? join(process.cwd(), ".stillwell"),
+    isOurs,
+  });
   const end = (): void => {
     engine.close();
     void server.close().then(() => process.exit(0));

@@ -174,6 +174,8 @@ export function createEngine({ root, cwd, onDisplay }: EngineParts): Engine {
 
 /** The file in which tslab keeps the declarations of earlier cells. */
 const EARLIER = "__prev__.d.ts";
+/** "Expected 2 arguments, but got 1." */
+const TOO_FEW = 2554;
 const LINK_FORMAT = "%s%d:%d - %s";
 
 function asDiagnostic([file, line, column, message]: readonly unknown[]): Diagnostic {
@@ -199,6 +201,8 @@ function chains(
     if (!d.file || d.start === undefined || !held.has(`${d.code} ${chain[0] ?? ""}`)) return [];
     const { line, character } = compiler.getLineAndCharacterOfPosition(d.file, d.start);
     const isCell = d.file.fileName.endsWith("__tslab__.ts");
+    // Which argument is missing stands in a note beside the message.
+    const notes = d.code === TOO_FEW ? (d.relatedInformation ?? []) : [];
     return [
       {
         file: isCell ? null : relative(cwd, d.file.fileName),
@@ -206,7 +210,7 @@ function chains(
         line: isCell ? line : line + 1,
         column: character + 1,
         code: d.code,
-        chain,
+        chain: [...chain, ...notes.flatMap((note) => links(note.messageText))],
       },
     ];
   });

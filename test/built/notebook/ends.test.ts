@@ -14,6 +14,9 @@ const left = (): string[] => readdirSync(folders.temporary);
 describe("a kernel that ends by itself", () => {
   it("is told at once to the cell that ran and to those after it; nothing is left", async () => {
     const kernel = await start();
+    // The limit of a cell does not end a kernel that an interrupt reaches.
+    expect((await kernel.execute("for (;;) {}", { timeoutMs: 400 })).status).toBe("timeout");
+    expect((await kernel.execute("1", { timeoutMs: 20_000 })).status).toBe("ok");
     const result = await kernel.execute("process.exit(3)", { timeoutMs: 20_000 });
     expect(result.status).toBe("died");
     expect(kernel.ended).toBe("ended with exit code 3");
@@ -35,24 +38,6 @@ describe("a kernel that ends by itself", () => {
     await expect(
       KernelClient.start({ argv: silent, cwd: folders.work, startTimeoutMs: 300 }),
     ).rejects.toMatchObject({ code: "kernel-did-not-start" });
-    expect(left()).toEqual([]);
-  });
-});
-
-describe("a cell past its limit", () => {
-  it("is interrupted; the kernel lives on where that is enough and is killed where it is not", async () => {
-    const kernel = await start();
-    const pid = kernel.pid ?? 0;
-    expect((await kernel.execute("for (;;) {}", { timeoutMs: 500 })).status).toBe("timeout");
-    expect((await kernel.execute("1", { timeoutMs: 20_000 })).status).toBe("ok");
-    // A loop that computes after an await cannot be interrupted.
-    const result = await kernel.execute("await null; for (;;) {}", {
-      timeoutMs: 500,
-      graceMs: 300,
-    });
-    expect(result.status).toBe("timeout");
-    await kernel.stop();
-    expect(isAlive(pid)).toBe(false);
     expect(left()).toEqual([]);
   });
 });
@@ -80,25 +65,37 @@ sleeper.pid`,
 });
 
 describe("when the program that started a kernel ends", () => {
-  const client = new URL(`file://${packageRoot()}/dist/notebook/index.js`).href;
-  const program = (ending: string): string => `
-    import { KernelClient, kernelCommand } from ${JSON.stringify(client)};
-    const kernel = await KernelClient.start({
-      argv: kernelCommand(), cwd: process.cwd(), startTimeoutMs: 60000 });
+  const compiled = (file: string): string =>
+    JSON.stringify(new URL(`file://${packageRoot()}/dist/notebook/${file}`).href);
+  const idle = `
+    import { KernelProcess } from ${compiled("kernel-process.js")};
+    const argv = [process.execPath, "-e", "setInterval(() => 0, 1000)"];
+    const kernel = await KernelProcess.start({ argv, cwd: process.cwd() });`;
+  // A kernel that computes for ever must find out by itself.
+  const busy = `
+    import { KernelClient, kernelCommand } from ${compiled("index.js")};
+    const argv = kernelCommand();
+    const kernel = await KernelClient.start({ argv, cwd: process.cwd(), startTimeoutMs: 60000 });
     void kernel.execute("await null; for (;;) {}", { timeoutMs: null });
-    setTimeout(() => { console.log(kernel.pid); ${ending} }, 300);
-    setInterval(() => 0, 1000);`;
-
+    await new Promise((resolve) => setTimeout(resolve, 300));`;
   const endings = [
-    { how: "by Ctrl-C", ending: "", signal: "SIGINT" },
-    { how: "by an exception", ending: 'throw new Error("unforeseen")', signal: null },
-    { how: "by SIGKILL, with the kernel busy", ending: "", signal: "SIGKILL" },
+    { how: "by Ctrl-C", program: idle, ending: "", signal: "SIGINT" },
+    {
+      how: "by an exception",
+      program: idle,
+      ending: "throw new Error('unforeseen')",
+      signal: null,
+    },
+    { how: "by its own exit", program: idle, ending: "process.exit(0)", signal: null },
+    { how: "by SIGKILL, with the kernel busy", program: busy, ending: "", signal: "SIGKILL" },
   ] as const;
   it("however it ends, the kernel and its folder are gone too", async () => {
-    const seen = endings.map(async ({ how, ending, signal }) => {
-      const args = ["--input-type=module", "-e", program(ending)];
-      const stdio = ["ignore", "pipe", "ignore"] as const;
-      const child = spawn(process.execPath, args, { cwd: folders.work, stdio: [...stdio] });
+    const seen = endings.map(async ({ how, program, ending, signal }) => {
+      const text = `${program}\nconsole.log(kernel.pid); setInterval(() => 0, 1000);\n${ending}`;
+      const child = spawn(process.execPath, ["--input-type=module", "-e", text], {
+        cwd: folders.work,
+        stdio: ["ignore", "pipe", "ignore"],
+      });
       const ended = new Promise((resolve) => child.on("exit", (_code, by) => resolve(by)));
       const pid = await new Promise<number>((resolve) =>
         child.stdout.on("data", (bytes: Buffer) => resolve(Number(bytes.toString()))),

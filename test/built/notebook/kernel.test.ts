@@ -79,6 +79,15 @@ f(
       /^expected a length, got a number without a unit; units: .*\bft\b/,
     );
   });
+  it("is also a unit that is not called, or an argument that is not given", async () => {
+    await good('const needs = (bore: Quantity<"length">, why: string) => bore + why.length;');
+    expect((await run('needs(mm, "x")')).error?.evalue).toBe(
+      "expected a length, got a unit; it is called with a number",
+    );
+    expect((await run("needs(mm(3))")).error?.evalue).toBe(
+      "An argument for 'why' was not provided",
+    );
+  });
   it("is also a null where a value must be", async () => {
     expect(await run("const s: string = null;")).toMatchObject({
       status: "failed",
