@@ -39,7 +39,7 @@ export function newStudy(
   };
   const starter = join(root, "starter");
   for (const name of readdirSync(starter))
-    put(name === "gitignore" ? ".gitignore" : name, readFileSync(join(starter, name)));
+    put(/^(gitignore|npmrc)$/.test(name) ? `.${name}` : name, readFileSync(join(starter, name)));
   const stub = join(root, "vendor", "tf-stub");
   for (const name of readdirSync(stub))
     put(join("vendor", "tf-stub", name), readFileSync(join(stub, name)));
