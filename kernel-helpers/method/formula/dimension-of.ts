@@ -29,11 +29,16 @@ function walk(
     case "constant":
       return e.name === "g" ? G : NONE;
     case "name":
-      return dims[e.name] ?? fail(text, `does not know the dimension of "${e.name}"`);
+      return (
+        (Object.hasOwn(dims, e.name) ? dims[e.name] : undefined) ??
+        fail(text, `does not know the dimension of "${e.name}"`)
+      );
     case "minus":
       return of(e.of);
     case "call": {
-      const args = e.args.map(of);
+      // Nothing is the same in every unit: max(0, v) is a velocity.
+      const isNothing = (x: Expression): boolean => x.node === "number" && x.value === 0;
+      const args = (e.args.every(isNothing) ? e.args : e.args.filter((x) => !isNothing(x))).map(of);
       const [first = NONE] = args;
       if (e.fn === "sqrt") return map(first, (x) => x / 2);
       if (e.fn === "abs") return first;

@@ -1,57 +1,102 @@
 import { SolveError } from "../../errors/index.js";
 import { constants, functions, type Expression, type Formula } from "./expression.js";
 
-/** The value of a formula; a division by zero, the root of a negative number and the like are named errors. */
-export function evaluateFormula(
-  { tree, text }: Formula,
-  values: { readonly [name: string]: number },
-): number {
-  const x = run(tree, values, text);
-  if (Number.isFinite(x)) return x;
-  throw fault(text, `gives ${x}`);
+type Values = { readonly [name: string]: number };
+type Run = (values: Values) => number;
+
+const compiled = new WeakMap<Formula, Run>();
+
+/**
+ * The value of a formula. A division by zero, the root of a negative number, an overflow on the way
+ * and the like are named errors, `not-finite`. A formula is compiled at its first use.
+ */
+export function evaluateFormula(formula: Formula, values: Values): number {
+  let run = compiled.get(formula);
+  if (!run) compiled.set(formula, (run = compile(formula.tree, formula.text)));
+  return run(values);
 }
 
-function run(e: Expression, values: { readonly [name: string]: number }, text: string): number {
+function compile(e: Expression, text: string): Run {
   switch (e.node) {
-    case "number":
-      return e.value;
-    case "constant":
-      return constants[e.name];
+    case "number": {
+      const { value } = e;
+      return () => value;
+    }
+    case "constant": {
+      const value = constants[e.name];
+      return () => value;
+    }
     case "name": {
-      const x = values[e.name];
-      if (x === undefined) throw fault(text, `has no value for "${e.name}"`);
-      return x;
+      const { name } = e;
+      return (values) => {
+        // A name may also be one that every object inherits.
+        const x: unknown = values[name];
+        if (typeof x !== "number") throw fault(text, `has no value for "${name}"`);
+        if (!Number.isFinite(x)) throw fault(text, `is given ${x} for "${name}"`);
+        return x;
+      };
     }
-    case "minus":
-      return -run(e.of, values, text);
-    case "call": {
-      const args = e.args.map((a) => run(a, values, text));
-      const x = functions[e.fn](...(args as [number]));
-      if (Number.isNaN(x)) throw fault(text, `takes ${e.fn} of ${args.join(", ")}`);
-      return x;
+    case "minus": {
+      const of = compile(e.of, text);
+      return (values) => -of(values);
     }
-    case "binary": {
-      const a = run(e.left, values, text);
-      const b = run(e.right, values, text);
-      switch (e.op) {
-        case "+":
-          return a + b;
-        case "-":
-          return a - b;
-        case "*":
-          return a * b;
-        case "/":
-          if (b === 0) throw fault(text, "divides by zero");
-          return a / b;
-        case "^": {
-          const x = a ** b;
-          if (Number.isNaN(x)) throw fault(text, `raises ${a} to the power ${b}`);
-          return x;
-        }
-      }
-    }
+    case "call":
+      return compileCall(e, text);
+    case "binary":
+      return compileBinary(e, text);
   }
 }
+
+function compileCall({ fn, args }: Expression & { node: "call" }, text: string): Run {
+  const of = args.map((a) => compile(a, text));
+  const apply = functions[fn];
+  const [one] = of;
+  const checked = (y: number, x: readonly number[]): number => {
+    if (Number.isFinite(y)) return y;
+    const at = x.join(", ");
+    throw fault(
+      text,
+      Number.isNaN(y) || y < 0 ? `takes ${fn} of ${at}` : `${fn} of ${at} gives ${y}`,
+    );
+  };
+  if (one && of.length === 1)
+    return (values) => {
+      const x = one(values);
+      const y = apply(x);
+      return Number.isFinite(y) ? y : checked(y, [x]);
+    };
+  return (values) => {
+    const x = of.map((f) => f(values));
+    return checked(apply(...x), x);
+  };
+}
+
+function compileBinary({ op, left, right }: Expression & { node: "binary" }, text: string): Run {
+  const a = compile(left, text);
+  const b = compile(right, text);
+  const checked = (y: number, x: number, by: number): number => {
+    if (Number.isFinite(y)) return y;
+    if (op === "/" && by === 0) throw fault(text, "divides by zero");
+    if (op === "^" && (Number.isNaN(y) || x === 0))
+      throw fault(text, `raises ${x} to the power ${by}`);
+    throw fault(text, `overflows in ${x} ${op} ${by}`);
+  };
+  const operate = OPERATORS[op];
+  return (values) => {
+    const x = a(values);
+    const by = b(values);
+    const y = operate(x, by);
+    return Number.isFinite(y) ? y : checked(y, x, by);
+  };
+}
+
+const OPERATORS = {
+  "+": (x: number, y: number) => x + y,
+  "-": (x: number, y: number) => x - y,
+  "*": (x: number, y: number) => x * y,
+  "/": (x: number, y: number) => x / y,
+  "^": (x: number, y: number) => x ** y,
+} as const;
 
 const fault = (text: string, problem: string): SolveError =>
   new SolveError({ code: "not-finite", where: `formula "${text}"`, problem });

@@ -13,6 +13,9 @@ interface Token {
   readonly at: number;
 }
 
+const LONGEST = 2000;
+const DEEPEST = 100;
+
 /**
  * Text → formula. Numbers, names, + − * / ^ (right-associative, above the unary minus), parentheses and
  * a few functions; `pi` and `g` are constants unless `shadowed` names them as values of one's own.
@@ -20,6 +23,7 @@ interface Token {
 export function parseFormula(text: string, shadowed: readonly string[] = []): Formula {
   const tokens = tokenize(text);
   let i = 0;
+  let depth = 0;
   const names: string[] = [];
   const peek = (): Token => tokens[i] ?? { kind: "end", text: "", at: text.length };
   const take = (sign: string): boolean => {
@@ -46,8 +50,18 @@ export function parseFormula(text: string, shadowed: readonly string[] = []): Fo
       left = { node: "binary", op, left, right: signed() };
     }
   };
-  const signed = (): Expression =>
-    take("-") ? { node: "minus", of: signed() } : take("+") ? signed() : power();
+  // Every way to nest, by a sign, a power, parentheses or a call, passes here.
+  const signed = (): Expression => {
+    depth += 1;
+    if (depth > DEEPEST) throw wrong(text, peek(), `a formula nested less than ${DEEPEST} deep`);
+    const inner: Expression = take("-")
+      ? { node: "minus", of: signed() }
+      : take("+")
+        ? signed()
+        : power();
+    depth -= 1;
+    return inner;
+  };
   const power = (): Expression => {
     const left = atom();
     return take("^") ? { node: "binary", op: "^", left, right: signed() } : left;
@@ -60,7 +74,11 @@ export function parseFormula(text: string, shadowed: readonly string[] = []): Fo
       return inner;
     }
     i += 1;
-    if (t.kind === "number") return { node: "number", value: Number(t.text), typed: t.text };
+    if (t.kind === "number") {
+      const value = Number(t.text);
+      if (!Number.isFinite(value)) throw wrong(text, t, "a finite number");
+      return { node: "number", value, typed: t.text };
+    }
     if (t.kind !== "name") {
       i -= 1;
       throw wrong(text, t, "a number, a name or an opening parenthesis");
@@ -93,6 +111,13 @@ export function parseFormula(text: string, shadowed: readonly string[] = []): Fo
 }
 
 function tokenize(text: string): Token[] {
+  if (text.length > LONGEST)
+    throw new InputError({
+      code: "not-a-formula",
+      where: `formula "${text.slice(0, 60)}…"`,
+      problem: `is ${text.length} characters long`,
+      expected: `at most ${LONGEST}`,
+    });
   const out: Token[] = [];
   const pattern =
     /\s*(?:(\d+\.?\d*(?:[eE][+-]?\d+)?|\.\d+(?:[eE][+-]?\d+)?)|([A-Za-z_][A-Za-z0-9_]*)|([-+*/^(),]))/y;
