@@ -5,6 +5,8 @@ const FLATTEST = 0.25;
 const STEEPEST = 8;
 /** Longest secant step in ln x. */
 const LONGEST = 5;
+/** How far from 1 a root is sought, in ln x: squares of it stay finite. */
+const FARTHEST = 300;
 
 export interface RisingRoot {
   /** Positive, and rising like a power of x: drag, friction, the gradient of a pack. */
@@ -54,11 +56,11 @@ function bracketed(
   where: string,
 ): number {
   const g = (s: number): number => Math.log(f(Math.exp(s)) / target);
-  const end = Math.log(limit);
+  const end = Math.min(Math.log(limit), FARTHEST);
   let low = Math.log(guess);
   let high = low;
-  for (let i = 0; i < 60 && g(low) > 0; i++) low -= 2 ** Math.min(i, 5);
-  for (let i = 0; i < 60 && g(high) < 0 && high < end; i++)
+  for (let i = 0; i < 60 && low > -FARTHEST && g(low) > 0; i++) low -= 2 ** Math.min(i, 5);
+  for (let i = 0; i < 60 && high < end && g(high) < 0; i++)
     high = Math.min(high + 2 ** Math.min(i, 5), end);
   return Math.exp(findRoot(g, low, high, { relative: 1e-15, absolute: 1e-14, where }));
 }

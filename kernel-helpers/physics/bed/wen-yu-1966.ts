@@ -8,8 +8,9 @@ import { liftInputs } from "./lift-inputs.js";
  * Superficial velocity of minimum fluidisation, without the voidage.
  *
  * ρud/µ = √(33.7² + 0.0408 Ar) − 33.7, Ar = d³ρ(ρ_s−ρ) g cos θ/µ²; u in m/s, d the volume-equivalent
- * grain diameter [m], densities ρ, ρ_s [kg/m³], µ [Pa·s]. The constants stand for (1−ε)/ε³ ≈ 11 and
- * 1/ε³ ≈ 14, so for a loose bed at ε ≈ 0.41-0.42; ε and D take no part. cos θ is the weight along an
+ * grain diameter [m], densities ρ, ρ_s [kg/m³], µ [Pa·s]. The constants stand for (1−ε)/ε³ ≈ 11 (spheres
+ * at ε 0.38, which counts for fine grains) and 1/ε³ ≈ 14 (ε 0.41, coarse grains); ε and D take no
+ * part. cos θ is the weight along an
  * inclined hole (ours; the source is for vertical). Data 0.001 < Re < 4000, scatter about ±34 %.
  * Throws InputError for a solid lighter than the fluid. Wen and Yu (1966).
  */

@@ -6,7 +6,7 @@ import { bedVoidage, fittingRatio, sphereBedFamily, sphereBedInputs } from "./vo
  * Mean voidage of equal spheres shaken or vibrated into a bore (dense random packing).
  *
  * λ = d/D: ε = 0.372 + 0.002 (exp(15.306 λ) − 1) to λ = 0.253; 0.681 − 1.363λ + 2.241λ² to 0.538;
- * 1 − 0.667λ³/√(2λ−1) above (zigzag). d sphere, D bore [m]. The branches meet within 0.015. Throws
+ * 1 − 0.667λ³/√(2λ−1) above (zigzag). d sphere, D bore [m]. The branches part by 0.014 and 0.027 where they meet. Throws
  * InputError for d > D. Zou and Yu (1995).
  */
 export const zouYuDense = method({

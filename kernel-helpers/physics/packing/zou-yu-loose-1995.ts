@@ -6,7 +6,7 @@ import { bedVoidage, fittingRatio, sphereBedFamily, sphereBedInputs } from "./vo
  * Mean voidage of equal spheres poured into a bore (loose random packing).
  *
  * λ = d/D: ε = 0.4 + 0.01 (exp(10.686 λ) − 1) to λ = 0.256; 0.846 − 1.898λ + 2.725λ² to 0.538;
- * 1 − 0.667λ³/√(2λ−1) above (zigzag). d sphere, D bore [m]. The branches meet within 0.015. Throws
+ * 1 − 0.667λ³/√(2λ−1) above (zigzag). d sphere, D bore [m]. The branches part by 0.007 and 0.010 where they meet. Throws
  * InputError for d > D. Zou and Yu (1995).
  */
 export const zouYuLoose = method({

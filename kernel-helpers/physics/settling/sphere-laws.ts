@@ -25,7 +25,7 @@ export type SphereLaw = keyof typeof sphereLaws;
  */
 export const crisisOnset: { readonly [law in SphereLaw]: number } = {
   "brown-lawler-2003": Infinity,
-  "clift-grace-weber-1978": 3.38e5 * (1 - 1e-12),
+  "clift-grace-weber-1978": 3.38e5 * (1 + 1e-12),
   "clift-gauvin-1970": Infinity,
   "haider-levenspiel-sphere-1989": Infinity,
   "morrison-2013": 239_171.5,
