@@ -49,7 +49,7 @@ function compile(e: Expression, text: string): Run {
 
 function compileCall({ fn, args }: Expression & { node: "call" }, text: string): Run {
   const of = args.map((a) => compile(a, text));
-  const apply = functions[fn];
+  const apply: (...x: number[]) => number = functions[fn];
   const [one] = of;
   const checked = (y: number, x: readonly number[]): number => {
     if (Number.isFinite(y)) return y;
