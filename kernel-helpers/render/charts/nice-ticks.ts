@@ -29,7 +29,7 @@ export function niceTicks([from, to]: readonly [number, number], count: number):
   const slack = 1e-9;
   const values: number[] = [];
   for (let n = Math.ceil(from / step - slack); n <= Math.floor(to / step + slack); n++)
-    values.push(value(n));
+    values.push(value(n) + 0); // no −0
   return { values, step, decimals: Math.max(0, -digits) };
 }
 

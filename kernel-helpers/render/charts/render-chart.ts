@@ -20,18 +20,25 @@ export async function renderChart(spec: ChartSpec): Promise<string> {
     });
   // Top-level await in vega keeps it out of modules that a notebook loads with require.
   const [vega, vegaLite] = await Promise.all([import("vega"), import("vega-lite")]);
-  const refuse = (uri: string): never => {
-    throw new RenderError({
+  // Vega only warns of what it could not load, and draws on without it.
+  const problems: unknown[] = [];
+  const refuse = (uri: string): RenderError => {
+    const refusal = new RenderError({
       code: "outside-data",
       where: "chart",
       problem: `asks for ${uri}`,
       expected: "all its data within it",
     });
+    problems.push(refusal);
+    return refusal;
   };
   const loader = vega.loader();
-  loader.load = (uri) => Promise.reject(failure(() => refuse(uri)));
-  loader.sanitize = (uri) => Promise.reject(failure(() => refuse(uri)));
-  const problems: unknown[] = [];
+  loader.load = (uri) => Promise.reject(refuse(uri));
+  // A rejection here would go unhandled; a link to nowhere is never written, as the problem is thrown.
+  loader.sanitize = (uri) => {
+    refuse(uri);
+    return Promise.resolve({ href: "" });
+  };
   const logger = vega.logger(vega.Warn);
   logger.error = (...reasons) => {
     problems.push(...reasons);
@@ -68,11 +75,3 @@ const labelled = (svg: string, description: string): string =>
     /^<svg /,
     () => `<svg role="img" aria-label="${escapeHtml(description)}" style="overflow:visible" `,
   );
-
-function failure(run: () => never): Error {
-  try {
-    return run();
-  } catch (error) {
-    return error instanceof Error ? error : new Error(String(error));
-  }
-}

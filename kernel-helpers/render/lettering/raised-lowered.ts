@@ -1,16 +1,21 @@
-// The body fonts hold none of these as glyphs of their own (only ¹ ² ³), and a fallback font would
-// differ from machine to machine; so they are set as raised and lowered plain characters.
+// Of these the body fonts hold only ¹ ² ³ as glyphs, and a fallback font would differ from machine to
+// machine; so they are set as raised and lowered plain characters.
 const raised = "⁰¹²³⁴⁵⁶⁷⁸⁹⁺⁻⁼⁽⁾ⁿⁱ";
 const raisedPlain = "0123456789+−=()ni";
 const lowered = "₀₁₂₃₄₅₆₇₈₉₊₋₌₍₎ₐₑₕᵢⱼₖₗₘₙₒₚᵣₛₜᵤᵥₓ";
 const loweredPlain = "0123456789+−=()aehijklmnoprstuvx";
 
 const runs = new RegExp(`([${raised}]+)|([${lowered}]+)`, "g");
+const onlyGlyphs = new RegExp(`^[^${raised.replace(/[¹²³]/g, "")}${lowered}]*$`);
 
-/** Text cut into plain, raised and lowered runs; the raised and lowered ones in plain characters. */
+/**
+ * Text cut into plain, raised and lowered runs; the raised and lowered ones in plain characters. Text
+ * that has no others than ¹ ² ³ keeps them as they are; beside others they are set like those.
+ */
 export function raisedLowered(
   text: string,
 ): readonly { readonly set: "plain" | "raised" | "lowered"; readonly text: string }[] {
+  if (onlyGlyphs.test(text)) return text === "" ? [] : [{ set: "plain", text }];
   const parts: { set: "plain" | "raised" | "lowered"; text: string }[] = [];
   let at = 0;
   for (const match of text.matchAll(runs)) {

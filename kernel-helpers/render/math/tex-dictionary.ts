@@ -38,7 +38,7 @@ export const operators: Readonly<Record<string, string>> = {
   "*": "times",
   "<": "is less than",
   ">": "is greater than",
-  ":": "to",
+  ":": ",",
   "\\cdot": "times",
   "\\times": "times",
   "\\ast": "times",
