@@ -1,12 +1,11 @@
 import { Command, CommanderError, InvalidArgumentError, Option } from "commander";
 import { StillwellError } from "../errors/index.js";
-import { stillwellVersion } from "../study/index.js";
+import { stillwellVersion } from "../study/version.js";
 import type { CommandContext } from "./commands/command-context.js";
-import { listMethods, type MethodsOptions } from "./commands/methods.js";
-import { newStudy, type NewOptions } from "./commands/new.js";
-import { makePackage, type PackageOptions } from "./commands/package.js";
-import { replayRecord } from "./commands/replay.js";
-import { run, type RunOptions } from "./commands/run.js";
+import type { MethodsOptions } from "./commands/methods.js";
+import type { NewOptions } from "./commands/new.js";
+import type { PackageOptions } from "./commands/package.js";
+import type { RunOptions } from "./commands/run.js";
 import { processTerminal } from "./terminal.js";
 
 const seconds = (text: string): number => {
@@ -14,6 +13,8 @@ const seconds = (text: string): number => {
   if (Number.isFinite(x) && x > 0) return x;
   throw new InvalidArgumentError(`${JSON.stringify(text)} is not a number of seconds above 0.`);
 };
+
+// Commands are loaded when called: help and a catalogue need no kernel and no browser.
 
 /** The command line: answers with the exit code. 0 done, 1 refused or failed, 2 wrongly called, 130 interrupted. */
 export async function main(argv: readonly string[]): Promise<number> {
@@ -45,6 +46,7 @@ export async function main(argv: readonly string[]): Promise<number> {
     .addOption(out())
     .addOption(limit())
     .action(async (notebook: string, options: RunOptions) => {
+      const { run } = await import("./commands/run.js");
       code = await run(notebook, options, context);
     });
   program
@@ -58,13 +60,15 @@ export async function main(argv: readonly string[]): Promise<number> {
     )
     .option("--no-pdf", "write the HTML only")
     .action(async (source: string, options: PackageOptions) => {
+      const { makePackage } = await import("./commands/package.js");
       code = await makePackage(source, options, context);
     });
   program
     .command("replay")
     .description("recompute a record without its notebook and compare")
     .argument("<record>", "a record.json")
-    .action((record: string) => {
+    .action(async (record: string) => {
+      const { replayRecord } = await import("./commands/replay.js");
       code = replayRecord(record, context);
     });
   program
@@ -72,7 +76,8 @@ export async function main(argv: readonly string[]): Promise<number> {
     .description("make a study folder that runs")
     .argument("<folder>", "the folder; what is in it already stays")
     .option("--from <spec>", "what the study depends on: a version, or a packed file")
-    .action((folder: string, options: NewOptions) => {
+    .action(async (folder: string, options: NewOptions) => {
+      const { newStudy } = await import("./commands/new.js");
       code = newStudy(folder, options, context);
     });
   program
@@ -81,7 +86,8 @@ export async function main(argv: readonly string[]): Promise<number> {
     .argument("[id]", "one method")
     .option("--family <name>", "only the methods for one thing")
     .option("--json", "as JSON")
-    .action((id: string | undefined, options: MethodsOptions) => {
+    .action(async (id: string | undefined, options: MethodsOptions) => {
+      const { listMethods } = await import("./commands/methods.js");
       code = listMethods(id, options, context);
     });
   for (const command of program.commands) command.exitOverride();
@@ -89,9 +95,13 @@ export async function main(argv: readonly string[]): Promise<number> {
     await program.parseAsync(["node", "stillwell", ...argv]);
   } catch (e) {
     if (e instanceof CommanderError) return e.exitCode === 0 ? 0 : 2;
+    if (stopping.signal.aborted) {
+      terminal.err("Interrupted.");
+      return 130;
+    }
     if (!(e instanceof StillwellError)) throw e;
     terminal.err(e.message);
-    return stopping.signal.aborted ? 130 : 1;
+    return 1;
   } finally {
     terminal.settle();
     process.off("SIGINT", onSignal);
