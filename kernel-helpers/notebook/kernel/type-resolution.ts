@@ -16,10 +16,8 @@ export interface TypeResolution {
   readonly resolver: (host: ts.ModuleResolutionHost) => Resolver;
 }
 interface Resolver {
-  readonly resolveModuleNameLiterals: NonNullable<
-    ts.ModuleResolutionHost & ts.CompilerHost
-  >["resolveModuleNameLiterals"];
-  readonly hasInvalidatedResolutions: () => boolean;
+  readonly resolveModuleNameLiterals: ts.CompilerHost["resolveModuleNameLiterals"];
+  readonly hasInvalidatedResolutions: (file: string) => boolean;
 }
 type Resolution = ts.ResolvedModuleWithFailedLookupLocations;
 
@@ -30,7 +28,7 @@ type Resolution = ts.ResolvedModuleWithFailedLookupLocations;
 export function typeResolution(parts: TypeResolutionParts): TypeResolution {
   const { compiler } = parts;
   const [root, cwd] = [slashed(parts.root), slashed(parts.cwd)];
-  const ours: Resolution & { failedLookupLocations?: never } = {
+  const ours: Resolution = {
     resolvedModule: {
       resolvedFileName: `${root}/${typesIn(root)}`,
       extension: compiler.Extension.Dts,
@@ -56,19 +54,21 @@ export function typeResolution(parts: TypeResolutionParts): TypeResolution {
     ],
   });
 
+  const isInstalled = (file: string): boolean =>
+    file.includes("/node_modules/") || file.startsWith(`${root}/dist/`);
   const resolver = (host: ts.ModuleResolutionHost): Resolver => {
     // What an installed package imports does not change while a kernel lives.
     const lasting = new Map<string, Resolution>();
     return {
       resolveModuleNameLiterals: (literals, from, redirected, given, file) => {
         const { paths: _, ...plain } = given;
-        const isInstalled = from.includes("/node_modules/") || from.startsWith(`${root}/dist/`);
+        const lasts = isInstalled(from);
         return literals.map((literal) => {
           const name = literal.text;
           if (name === "stillwell") return ours;
           const mode = compiler.getModeForUsageLocation(file, literal);
           const key = `${from}\n${name}\n${mode ?? ""}`;
-          const kept = isInstalled ? lasting.get(key) : undefined;
+          const kept = lasts ? lasting.get(key) : undefined;
           if (kept) return kept;
           const look = (place: string): Resolution =>
             compiler.resolveModuleName(name, place, plain, host, undefined, redirected, mode);
@@ -76,12 +76,12 @@ export function typeResolution(parts: TypeResolutionParts): TypeResolution {
           const isFound = near.resolvedModule !== undefined || /^[./]/.test(name);
           const home = isFound ? near : look(`${root}/home.ts`);
           const found = home.resolvedModule ? home : near;
-          if (isInstalled) lasting.set(key, found);
+          if (lasts) lasting.set(key, found);
           return found;
         });
       },
-      // Without this every resolution of every file is made again for each cell.
-      hasInvalidatedResolutions: () => false,
+      // Without this the imports of every file are looked up again for each cell.
+      hasInvalidatedResolutions: (file) => !isInstalled(file),
     };
   };
   return { options, resolver };
