@@ -37,11 +37,10 @@ export async function withBrowser<T>(
   const { signal } = options;
   signal?.throwIfAborted();
   const { found, started } = await start(options);
-  const kill = (): void => void started.process()?.kill("SIGKILL");
-  signal?.addEventListener("abort", kill);
+  const end = endOf(started, signal);
   try {
     const version = await started.version();
-    return await use({
+    const session: BrowserSession = {
       browser: found,
       version,
       withPage: async (html, usePage) => {
@@ -52,7 +51,9 @@ export async function withBrowser<T>(
           await page.close();
         }
       },
-    });
+    };
+    // Puppeteer waits out its own timeouts for some answers of a browser that is gone.
+    return await Promise.race([use(session), end.reached]);
   } catch (error) {
     signal?.throwIfAborted();
     if (started.connected || error instanceof RenderError) throw error;
@@ -64,10 +65,40 @@ export async function withBrowser<T>(
       cause: error,
     });
   } finally {
-    signal?.removeEventListener("abort", kill);
+    end.forget();
     await close(started);
   }
 }
+
+/** Rejects when the browser ends by itself, or when the signal has ended it. */
+function endOf(
+  started: PuppeteerBrowser,
+  signal: AbortSignal | undefined,
+): { readonly reached: Promise<never>; readonly forget: () => void } {
+  const child = started.process();
+  const ended = new AbortController();
+  const onExit = (): void => ended.abort(new Error("the browser has ended"));
+  const onAbort = (): void => {
+    child?.kill("SIGKILL");
+    ended.abort(signal?.reason);
+  };
+  child?.once("exit", onExit);
+  signal?.addEventListener("abort", onAbort);
+  const reached = new Promise<never>((_, reject) => {
+    ended.signal.addEventListener("abort", () => reject(asError(ended.signal.reason)));
+  });
+  reached.catch(() => undefined);
+  return {
+    reached,
+    forget: () => {
+      child?.off("exit", onExit);
+      signal?.removeEventListener("abort", onAbort);
+    },
+  };
+}
+
+const asError = (reason: unknown): Error =>
+  reason instanceof Error ? reason : new Error(String(reason));
 
 interface Started {
   readonly found: FoundBrowser;

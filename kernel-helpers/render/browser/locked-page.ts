@@ -11,6 +11,8 @@ export interface LockedPage {
   close(): Promise<void>;
 }
 
+// `document.fonts` itself can be hidden by an element of that name in the page.
+const fontsReady = `Object.getOwnPropertyDescriptor(Document.prototype, "fonts").get.call(document).ready.then(() => true)`;
 const loadTimeout = 60_000; // ms
 const printTimeout = 150_000; // ms
 
@@ -29,7 +31,7 @@ export async function openLockedPage(browser: PuppeteerBrowser, html: string): P
       void (isOwn ? request.continue() : refuse(request)).catch(() => undefined);
     });
     await page.setContent(html, { waitUntil: "load", timeout: loadTimeout });
-    await page.evaluate("document.fonts.ready.then(() => true)");
+    await page.evaluate(fontsReady);
   } catch (error) {
     await page.close().catch(() => undefined);
     throw error;

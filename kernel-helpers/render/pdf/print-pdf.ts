@@ -2,6 +2,7 @@ import { InputError, RenderError } from "../../errors/index.js";
 import type { BrowserKind, BrowserSession, LockedPage } from "../browser/index.js";
 import { anchorPages } from "./anchor-pages.js";
 import { pdfFacts } from "./read-pdf.js";
+import { stableIds } from "./stable-ids.js";
 
 export interface PdfInfo {
   readonly title: string;
@@ -127,6 +128,7 @@ async function finish(
       where: `font ${loose.name}`,
       problem: "is not in the file, which would look otherwise on another machine",
     });
+  await stableIds(pdf);
   pdf.setTitle(info.title, { showInWindowTitleBar: true });
   pdf.setAuthor(info.author);
   pdf.setSubject(info.subject);
