@@ -8,12 +8,17 @@ const LONGEST = 5;
 /** How far from 1 a root is sought, in ln x: squares of it stay finite. */
 const FARTHEST = 300;
 
+/** The product of the last three residuals below which an inverse quadratic step is the last. */
+const LAST_PRODUCT = 1e-14;
+
 export interface RisingRoot {
   /** Positive, and rising like a power of x: drag, friction, the gradient of a pack. */
   readonly f: (x: number) => number;
   readonly target: number;
   /** A first x of the right order. */
   readonly guess: number;
+  /** d ln f/d ln x near it. */
+  readonly rise: number;
   /** Highest x sought, where f stops rising; none when left out. */
   readonly limit?: number;
   readonly where: string;
@@ -22,42 +27,50 @@ export interface RisingRoot {
 /**
  * The x at which a rising power-like function reaches a positive target.
  *
- * Secant steps on ln f against ln x, where such functions are nearly straight: five or six values
- * of f for full precision. Where the function jumps or bends too much, a bracket is widened from the
- * guess and the root finder takes over. Throws SolveError as the root finder does.
+ * Works on ln f against ln x, where such functions are nearly straight: a secant step, then inverse
+ * quadratic ones, four or five values of f for full precision. Where the function jumps or bends too
+ * much, a bracket is widened from the guess and the root finder takes over. Throws SolveError as the
+ * root finder does.
  */
-export function risingRoot({ f, target, guess, limit = Infinity, where }: RisingRoot): number {
-  const end = Math.log(limit);
-  let s = Math.min(Math.log(guess), end);
-  let r = Math.log(f(Math.exp(s)) / target);
-  let slope = 1.5;
-  for (let i = 0; i < 25 && slope > FLATTEST && slope < STEEPEST; i++) {
-    const step = Math.max(-LONGEST, Math.min(-r / slope, LONGEST, end - s));
-    if (Math.abs(step) < 1e-15 * Math.max(1, Math.abs(s))) {
-      if (Math.abs(r) < 1e-12) return Math.exp(s);
-      break;
+export function risingRoot(parts: RisingRoot): number {
+  const { f, target, guess, rise, limit = Infinity } = parts;
+  let x = Math.min(guess, limit);
+  // r = ln f/target at the last three points; q = d ln x/d ln f between the last two, and before
+  let r = Math.log(f(x) / target);
+  let r1 = 1;
+  let r2 = 1;
+  let q = 1 / rise;
+  let q1 = q;
+  for (let i = 0; i < 20; i++) {
+    let step = -r * q;
+    if (i > 1) {
+      const bend = (r * r1 * (q - q1)) / (r - r2);
+      if (Math.abs(bend) < 0.5 * Math.abs(step)) step += bend;
     }
-    s += step;
-    const before = r;
-    r = Math.log(f(Math.exp(s)) / target);
-    if (Math.abs(r) < 4e-15) return Math.exp(s);
-    if (Math.abs(r - before) > 1e-13) slope = (r - before) / step;
-    else if (Math.abs(r) < 1e-12) return Math.exp(s);
-    else break;
+    if (!(Math.abs(step) < LONGEST)) break;
+    let next = x * Math.exp(step);
+    if (next > limit) {
+      if (x === limit) break;
+      next = limit;
+      step = Math.log(next / x);
+    }
+    if (i > 1 && Math.abs(r * r1 * r2) < LAST_PRODUCT) return next;
+    x = next;
+    r2 = r1;
+    r1 = r;
+    r = Math.log(f(x) / target);
+    if (Math.abs(r) < 1e-15) return x;
+    q1 = q;
+    q = step / (r - r1);
+    if (!(q > 1 / STEEPEST && q < 1 / FLATTEST)) break;
   }
-  return bracketed(f, target, Math.min(guess, limit), limit, where);
+  return Math.abs(r) < 1e-14 ? x : bracketed(parts);
 }
 
-function bracketed(
-  f: (x: number) => number,
-  target: number,
-  guess: number,
-  limit: number,
-  where: string,
-): number {
+function bracketed({ f, target, guess, limit = Infinity, where }: RisingRoot): number {
   const g = (s: number): number => Math.log(f(Math.exp(s)) / target);
   const end = Math.min(Math.log(limit), FARTHEST);
-  let low = Math.log(guess);
+  let low = Math.min(Math.log(guess), end);
   let high = low;
   for (let i = 0; i < 60 && low > -FARTHEST && g(low) > 0; i++) low -= 2 ** Math.min(i, 5);
   for (let i = 0; i < 60 && high < end && g(high) < 0; i++)

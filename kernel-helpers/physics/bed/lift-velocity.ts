@@ -31,6 +31,7 @@ function lift({ d, eps, rho, rhoS, mu, D, theta, law }: Lift): number {
     f: (u) => gradient({ u, d, eps, rho, mu, D }),
     target: weight,
     guess: (2 * weight) / (viscous + Math.sqrt(viscous ** 2 + 4 * inertial * weight)),
+    rise: 1.5,
     where: "lift-velocity",
   });
 }

@@ -68,5 +68,17 @@ export const axialCylinder = method({
         },
       ],
     },
+    {
+      from: { cite: "white2011", where: "rows, and halfway between them" },
+      basis: "from memory",
+      rows: [
+        { given: { L: m(1), d: m(1) }, printed: "0.900" },
+        { given: { L: m(8), d: m(1) }, printed: "0.990" },
+        { given: { L: m(0.75), d: m(1) }, printed: "1.025" },
+        { given: { L: m(0.502), d: m(1) }, printed: "1.149" },
+        { given: { L: m(3), d: m(1) }, printed: "0.860" },
+        { given: { L: m(6), d: m(1) }, printed: "0.930" },
+      ],
+    },
   ],
 });

@@ -66,5 +66,16 @@ export const broadsideCylinder = method({
       basis: "from memory",
       rows: [{ given: { L: m(20), d: m(1) }, printed: "0.91" }],
     },
+    {
+      from: { cite: "white2011", where: "halfway between rows, and L/d 80 halfway in d/L" },
+      basis: "from memory",
+      rows: [
+        { given: { L: m(3.5), d: m(1) }, printed: "0.710" },
+        { given: { L: m(7.5), d: m(1) }, printed: "0.7800" },
+        { given: { L: m(15), d: m(1) }, printed: "0.8650" },
+        { given: { L: m(30), d: m(1) }, printed: "0.9450" },
+        { given: { L: m(80), d: m(1) }, printed: "1.0900" },
+      ],
+    },
   ],
 });

@@ -64,5 +64,17 @@ export const brownLawler = method({
         },
       ],
     },
+    {
+      from: { cite: "brown2003", where: "evaluated apart from this program" },
+      basis: "from memory",
+      rows: [
+        { given: { Re: 0.1 }, printed: "247.50" },
+        { given: { Re: 10 }, printed: "4.1275" },
+        { given: { Re: 100 }, printed: "1.0731" },
+        { given: { Re: 1000 }, printed: "0.46338" },
+        { given: { Re: 1e4 }, printed: "0.41061" },
+        { given: { Re: 1e5 }, printed: "0.46611" },
+      ],
+    },
   ],
 });

@@ -97,5 +97,26 @@ export const hoelzerSommerfeld = method({
         },
       ],
     },
+    {
+      from: {
+        cite: "hoelzer2008",
+        where: "sphere, and cube face-on with ψ∥ = ψ⊥, evaluated apart from this program",
+      },
+      basis: "from memory",
+      rows: [
+        { given: { Re: 1, psi: 1, psiPar: 1, psiPerp: 1 }, printed: "27.420" },
+        { given: { Re: 10, psi: 1, psiPar: 1, psiPerp: 1 }, printed: "3.7687" },
+        { given: { Re: 1000, psi: 1, psiPar: 1, psiPerp: 1 }, printed: "0.53887" },
+        { given: { Re: 1, psi: 0.805996, psiPar: 1.208994, psiPerp: 1.208994 }, printed: "29.241" },
+        {
+          given: { Re: 100, psi: 0.805996, psiPar: 1.208994, psiPerp: 1.208994 },
+          printed: "1.2201",
+        },
+        {
+          given: { Re: 1e4, psi: 0.805996, psiPar: 1.208994, psiPerp: 1.208994 },
+          printed: "0.65427",
+        },
+      ],
+    },
   ],
 });

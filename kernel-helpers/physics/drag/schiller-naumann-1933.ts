@@ -51,5 +51,23 @@ export const schillerNaumann = method({
         },
       ],
     },
+    {
+      from: { cite: "schiller1933", where: "evaluated apart from this program" },
+      basis: "from memory",
+      rows: [
+        { given: { Re: 0.1 }, printed: "247.40" },
+        { given: { Re: 1 }, printed: "27.600" },
+        { given: { Re: 10 }, printed: "4.1511" },
+        { given: { Re: 100 }, printed: "1.0917" },
+        {
+          given: { Re: 999 },
+          printed: "0.43836",
+          within: 0.0002,
+          because: "next to the step, by hand",
+        },
+        { given: { Re: 1001 }, printed: "0.4400" },
+        { given: { Re: 1e4 }, printed: "0.4400" },
+      ],
+    },
   ],
 });

@@ -74,5 +74,16 @@ export const dixonCylinders = method({
         },
       ],
     },
+    {
+      from: {
+        cite: "dixon1988",
+        where: "just above each limit, evaluated apart from this program",
+      },
+      basis: "from memory",
+      rows: [
+        { given: { d: m(0.603), D: m(1) }, printed: "0.67264" },
+        { given: { d: m(0.703), D: m(1) }, printed: "0.62292" },
+      ],
+    },
   ],
 });

@@ -70,5 +70,16 @@ export const dixonSpheres = method({
         { given: { d: m(0.52), D: m(1) }, printed: "0.57728" },
       ],
     },
+    {
+      from: {
+        cite: "dixon1988",
+        where: "just above each limit, evaluated apart from this program",
+      },
+      basis: "from memory",
+      rows: [
+        { given: { d: m(0.503), D: m(1) }, printed: "0.53539" },
+        { given: { d: m(0.538), D: m(1) }, printed: "0.62324" },
+      ],
+    },
   ],
 });

@@ -62,5 +62,13 @@ export const zouYuDense = method({
         { given: { d: m(0.5), D: m(1) }, printed: "0.55975" },
       ],
     },
+    {
+      from: { cite: "zou1995", where: "just above each limit, evaluated apart from this program" },
+      basis: "from memory",
+      rows: [
+        { given: { d: m(0.2545), D: m(1) }, printed: "0.47927" },
+        { given: { d: m(0.54), D: m(1) }, printed: "0.62867" },
+      ],
+    },
   ],
 });

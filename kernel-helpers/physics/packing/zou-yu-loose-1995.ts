@@ -62,5 +62,13 @@ export const zouYuLoose = method({
         { given: { d: m(0.5), D: m(1) }, printed: "0.57825" },
       ],
     },
+    {
+      from: { cite: "zou1995", where: "just above each limit, evaluated apart from this program" },
+      basis: "from memory",
+      rows: [
+        { given: { d: m(0.257), D: m(1) }, printed: "0.53820" },
+        { given: { d: m(0.54), D: m(1) }, printed: "0.62867" },
+      ],
+    },
   ],
 });

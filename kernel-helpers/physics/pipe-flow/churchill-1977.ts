@@ -40,6 +40,18 @@ export const churchill = method({
       ],
     },
     {
+      from: { cite: "fluids", where: "friction.Churchill_1977 in the transition" },
+      basis: "general reference library",
+      rows: [
+        {
+          given: { Re: 3000, eD: 0 },
+          printed: "0.042974656318",
+          within: 1e-10,
+          because: "eleven digits",
+        },
+      ],
+    },
+    {
       from: { cite: "derivation", where: "64/Re at Re 500" },
       basis: "exact limit or identity",
       rows: [{ given: { Re: 500, eD: 1e-3 }, printed: "0.1280000" }],

@@ -61,5 +61,18 @@ export const richardsonZaki = method({
         { given: { Re: 300, Ar: 4e4, d: m(1e-9), D: m(1) }, printed: "2.5156" },
       ],
     },
+    {
+      from: {
+        cite: "richardson1954",
+        where: "just above each limit, evaluated apart from this program",
+      },
+      basis: "from memory",
+      rows: [
+        { given: { Re: 0.201, Ar: 100, d: m(1e-9), D: m(1) }, printed: "4.5645" },
+        { given: { Re: 1.005, Ar: 100, d: m(1e-9), D: m(1) }, printed: "4.4478" },
+        { given: { Re: 201, Ar: 100, d: m(0.1), D: m(1) }, printed: "2.6184" },
+        { given: { Re: 502, Ar: 100, d: m(1e-9), D: m(1) }, printed: "2.3900" },
+      ],
+    },
   ],
 });

@@ -3,7 +3,7 @@ import { cP, kgpm3, mm, mmps, mps, micrometre } from "../../units/index.js";
 import { fluidDensity, fluidViscosity, solidDensity } from "../fields.js";
 import { gravity, holdsGravity } from "../gravity.js";
 import { refuseBuoyant } from "../refuse.js";
-import { risingRoot } from "../rising-root.js";
+import { fallReynolds } from "./fall-reynolds.js";
 import { crisisOnset, sphereLaws, type SphereLaw } from "./sphere-laws.js";
 
 const names = Object.keys(sphereLaws) as SphereLaw[];
@@ -18,17 +18,11 @@ interface Sphere {
 
 function fall({ d, rho, rhoS, mu, law }: Sphere): number {
   refuseBuoyant("terminal-velocity-sphere", rhoS, rho);
-  const drag = sphereLaws[law].si;
-  const Ar = (d ** 3 * rho * (rhoS - rho) * gravity) / mu ** 2;
-  if (Ar === 0) return 0;
-  const f = (Re: number): number => drag({ Re }) * Re ** 2;
-  const target = (4 / 3) * Ar;
-  const onset = crisisOnset[law];
-  const Re = risingRoot({
-    f,
-    target,
-    guess: Ar / (18 + 0.6 * Math.sqrt(Ar)),
-    limit: onset < Infinity && target <= f(onset) ? onset : Infinity,
+  const { si } = sphereLaws[law];
+  const Re = fallReynolds({
+    drag: (Re) => si({ Re }),
+    Ar: (d * d * d * rho * (rhoS - rho) * gravity) / (mu * mu),
+    onset: crisisOnset[law],
     where: "terminal-velocity-sphere",
   });
   return (Re * mu) / (rho * d);

@@ -61,5 +61,17 @@ export const diFelice = method({
         because: "two fits to different measurements",
       })),
     },
+    {
+      from: { cite: "difelice1996", where: "evaluated apart from this program" },
+      basis: "from memory",
+      rows: [
+        { given: { d: m(0.5), D: m(1), Re: 0 }, printed: "0.18409" },
+        { given: { d: m(0.5), D: m(1), Re: 10 }, printed: "0.34504" },
+        { given: { d: m(0.5), D: m(1), Re: 100 }, printed: "0.57688" },
+        { given: { d: m(0.5), D: m(1), Re: 1e5 }, printed: "0.64660" },
+        { given: { d: m(0.8), D: m(1), Re: 0 }, printed: "0.01357" },
+        { given: { d: m(0.8), D: m(1), Re: 100 }, printed: "0.24717" },
+      ],
+    },
   ],
 });
