@@ -19,7 +19,7 @@ export const bedGradient = {
 
 export const bedFamily = "packed-bed pressure gradient";
 
-interface BedFlow {
+export interface BedFlow {
   readonly u: number;
   readonly d: number;
   readonly eps: number;

@@ -15,7 +15,7 @@ export const bedVoidage = {
   note: "mean voidage over the whole bore",
 } as const;
 
-interface Pair {
+export interface Pair {
   readonly d: number;
   readonly D: number;
 }
