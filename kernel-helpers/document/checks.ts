@@ -37,10 +37,15 @@ function margin(ctx: Context, item: CheckItem, limit: unknown): string {
         ? "pressureDifference"
         : item.of;
   const shown = joined(showNumber(kind, item.margin, ctx.system));
-  const share =
+  const percent =
     typeof limit === "number" && limit !== 0 && item.of !== "temperature"
-      ? ` (${formatNumber((100 * item.margin) / Math.abs(limit), 2)}\u00a0% of the limit)`
-      : "";
+      ? (100 * item.margin) / Math.abs(limit)
+      : null;
+  // A share of a limit that is small beside the value tells nothing.
+  const share =
+    percent === null || Math.abs(percent) > 300
+      ? ""
+      : ` (${formatNumber(percent, 2)}\u00a0% of the limit)`;
   return shown + share;
 }
 

@@ -5,6 +5,7 @@ import { presentDeclared } from "./present-declared.js";
 import { presentFrame } from "./present-frame.js";
 import { presentQuantities } from "./present-quantities.js";
 import { presentReference } from "./present-reference.js";
+import { presentStudy } from "./present-study.js";
 import { presentSelfShown } from "./present-self-shown.js";
 import type { Presenter } from "./presenter.js";
 
@@ -12,6 +13,7 @@ import type { Presenter } from "./presenter.js";
 const presenters: readonly Presenter[] = [
   presentSelfShown,
   presentReference,
+  presentStudy,
   presentQuantities,
   presentDeclared,
   presentFrame,

@@ -1,64 +1,18 @@
-import { StudyError } from "../errors/index.js";
-import {
-  entityUse,
-  typeName,
-  type Fields,
-  type Method,
-  type Model,
-  type OneOf,
-  type Shape,
-  type Struct,
-  type Type,
-  type Use,
-  type Values,
-} from "../method/index.js";
-import { isKind, kinds, type Kind, type QuantityInput, type Unit } from "../units/index.js";
+import type { Method, Model, OneOf, Shape, Struct, Type, Values } from "../method/index.js";
+import { entityUse } from "../method/index.js";
+import type { Kind, QuantityInput, Unit } from "../units/index.js";
 import type { ChartUse } from "./chart-use.js";
 import { encode } from "./encode.js";
-import { evaluate, type Done } from "./evaluate.js";
 import { checkUse, compareUse, formulaUse, marginOf, type Verdict } from "./inline-uses.js";
-import type { Item, Sense, Spread, TableColumn, Verification } from "./item.js";
+import type { Sense, TableColumn } from "./item.js";
 import type { Node } from "./node.js";
-import type { WorkSheet } from "./work-sheet.js";
+import type { AssumedNotes, CheckNotes, FileOf, GivenNotes, Named } from "./notes.js";
+import { Recorder } from "./recorder.js";
 import { typeJson } from "./type-json.js";
 import { isRef, type FieldsOf, type Ref, type Shown, type Wired, type Wires } from "./wires.js";
 
-export interface Named {
-  /** What the package calls it; the id with spaces when left out. */
-  readonly title?: string;
-  /** TeX symbol. */
-  readonly symbol?: string;
-}
-export interface GivenNotes extends Named {
-  readonly source: string;
-  readonly spread?: Spread;
-}
-export interface AssumedNotes extends Named {
-  readonly reason: string;
-  /** How it can be verified, by whom (a role), and whether approval has to wait for it. */
-  readonly verify: { readonly how: string; readonly by: string; readonly required?: boolean };
-  readonly spread?: Spread;
-}
-export interface FileOf {
-  readonly file?: { readonly name: string; readonly sha256: string };
-}
-export interface CheckNotes extends Named {
-  /** Where the limit comes from. */
-  readonly because: string;
-}
-type Statement =
-  | { readonly op: "given"; readonly notes: GivenNotes & FileOf }
-  | { readonly op: "assumed"; readonly notes: AssumedNotes & FileOf };
-
 /** A part of a study that records: the study itself, or one of its sections. */
-export class Scope {
-  protected readonly sheet: WorkSheet;
-  protected readonly within: string | null;
-  constructor(sheet: WorkSheet, within: string | null) {
-    this.sheet = sheet;
-    this.within = within;
-  }
-
+export class Scope extends Recorder {
   /** A number with its unit as typed, a whole object, or one of several choices; with its source. */
   given<K extends Kind>(
     id: string,
@@ -314,161 +268,5 @@ export class Scope {
   section(id: string, title: string, about?: string): Scope {
     this.sheet.addSection({ id, title, about: about ?? null, within: this.within });
     return new Scope(this.sheet, id);
-  }
-
-  private state(id: string, a: unknown, b: unknown, { op, notes }: Statement): unknown {
-    this.sheet.ledger.admit(id);
-    const because = op === "given" ? notes.source : notes.reason;
-    const verify: Verification | null =
-      op === "given"
-        ? null
-        : { how: notes.verify.how, by: notes.verify.by, required: notes.verify.required ?? true };
-    if (typeof because !== "string" || because.trim() === "")
-      throw new StudyError({
-        code: "no-source",
-        where: id,
-        problem: op === "given" ? "has no source" : "has no reason",
-        remedy:
-          op === "given"
-            ? "say where it comes from, or record it as assumed"
-            : "say why it is reasonable",
-      });
-    const common = { ...this.common(id, notes), op, because, verify };
-    if (typeof a === "number" || typeof a === "string") {
-      const unit = b as Unit<Kind>;
-      const value = unit(a);
-      this.sheet.known.note(id, unit.kind, value);
-      const done: Done = {
-        type: unit.kind,
-        live: value,
-        result: { value },
-        findings: [],
-        looked: [],
-        diagnostics: {},
-      };
-      return this.keep(
-        {
-          ...common,
-          form: "number",
-          type: unit.kind,
-          typed: a,
-          unit: unit.symbol,
-          spread: notes.spread ?? null,
-          result: { value },
-        },
-        done,
-      );
-    }
-    const type = a as OneOf | Struct;
-    if (type.type === "oneOf") {
-      encode(type, b, id, this.sheet.ledger.owns);
-      const result = { value: b as string };
-      return this.keep(
-        { ...common, form: "choice", type: typeJson(type), result },
-        { type, live: b, result, findings: [], looked: [], diagnostics: {} },
-      );
-    }
-    const use = entityUse(type);
-    const { args, done } = this.evaluate(id, use, b as { readonly [name: string]: unknown });
-    if ("stop" in done.result)
-      throw new StudyError({ code: "no-value", where: id, problem: done.result.because });
-    this.sheet.uses.set(use.id, type);
-    return this.keep(
-      {
-        ...common,
-        form: "object",
-        use: type.id,
-        revision: type.revision,
-        args,
-        file: notes.file ?? null,
-        type: typeJson(type),
-        result: done.result,
-      },
-      done,
-    );
-  }
-
-  private apply<S extends Shape, T extends Type>(
-    op: "entity" | "step" | "run",
-    id: string,
-    use: Use<S, T>,
-    wires: unknown,
-    notes: Named,
-  ): Ref<Type> {
-    this.sheet.ledger.admit(id);
-    const { args, done } = this.evaluate(
-      id,
-      use as unknown as Use,
-      wires as { readonly [name: string]: unknown },
-    );
-    this.sheet.uses.set(use.id, use as unknown as Use);
-    return this.keep(
-      {
-        ...this.common(id, notes),
-        op,
-        use: use.id,
-        revision: use.revision,
-        args,
-        type: typeJson(use.output),
-        result: done.result,
-        findings: [...done.findings, ...this.sheet.known.findings(args, id)],
-        looked: done.looked,
-        diagnostics: done.diagnostics,
-      },
-      done,
-    );
-  }
-
-  private evaluate(
-    id: string,
-    use: Use,
-    wires: { readonly [name: string]: unknown },
-  ): { args: { readonly [name: string]: Node }; done: Done } {
-    const args = this.encodeAll(id, use.inputs, wires);
-    return { args, done: evaluate(use, id, args, this.sheet.ledger.get) };
-  }
-  private encodeAll(
-    id: string,
-    inputs: Fields<Shape>,
-    wires: { readonly [name: string]: unknown },
-  ): { readonly [name: string]: Node } {
-    for (const name of Object.keys(wires))
-      if (!Object.hasOwn(inputs, name))
-        throw new StudyError({
-          code: "unknown-field",
-          where: `${id}.${name}`,
-          problem: "is not an input",
-          expected: Object.keys(inputs).join(", "),
-        });
-    return Object.fromEntries(
-      Object.entries(inputs).map(([n, f]) => [
-        n,
-        encode(f.kind, wires[n], `${id}.${n}`, this.sheet.ledger.owns),
-      ]),
-    );
-  }
-  private kindOf(ref: { readonly __ref: Type }, where: string): Kind {
-    if (isKind(ref.__ref)) return ref.__ref;
-    throw new StudyError({
-      code: "wrong-kind",
-      where,
-      problem: `is a ${typeName(ref.__ref)}`,
-      expected: `a number: ${Object.keys(kinds).slice(0, 3).join(", ")} …`,
-    });
-  }
-  private common(
-    id: string,
-    notes: Named,
-  ): { id: string; section: string | null; title: string; symbol: string | null } {
-    return {
-      id,
-      section: this.within,
-      title: notes.title ?? id.replace(/[-_.]/g, " "),
-      symbol: notes.symbol ?? null,
-    };
-  }
-  private keep(item: Item, done: Done | null): Ref<Type> {
-    this.sheet.ledger.put(item, done);
-    return this.sheet.ledger.ref(item.id, done?.type ?? "dimensionless");
   }
 }

@@ -1,7 +1,7 @@
 import { InputError } from "../errors/index.js";
 import type { Kind } from "./kinds.js";
 import { parseMixedNumber } from "./mixed-number.js";
-import type { Quantity } from "./quantity.js";
+import type { Quantity, QuantityInput } from "./quantity.js";
 
 /** Where a conversion factor comes from. */
 export type FactorSource = "SI" | "NIST SP 811, app. B" | "definition";
@@ -46,5 +46,5 @@ export function unit<K extends Kind>(parts: UnitParts<K>): Unit<K> {
 }
 
 /** The number that a quantity has in a unit: `inUnit(ft(12), inch) === 144`. */
-export const inUnit = <K extends Kind>(q: number & { readonly __kind?: K }, u: Unit<K>): number =>
+export const inUnit = <U extends Unit<Kind>>(q: QuantityInput<U["kind"]>, u: U): number =>
   (q - u.offset) / u.scale;

@@ -2,8 +2,8 @@ import type { DepthDrawing } from "../../document/index.js";
 import { depthChart, renderChart } from "../charts/index.js";
 import { sideBySide, wellSketch } from "../sketch/index.js";
 
-const HEIGHT = 560;
-const PLOT = { plotTop: 44, plotBottom: 520 } as const;
+const HEIGHT = 430;
+const PLOT = { plotTop: 44, plotBottom: 396 } as const;
 
 /** A drawing of the view model in pixels: the well to scale in depth beside curves on the same depths. */
 export async function drawingSvg(d: DepthDrawing, label: string): Promise<string> {
