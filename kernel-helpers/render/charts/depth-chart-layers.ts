@@ -1,9 +1,10 @@
 import { spread } from "../lettering/spread.js";
+import { textWidth } from "../lettering/text-width.js";
 import type { ChartValue } from "./chart-spec.js";
 import type { DepthChart, DepthSeries } from "./depth-chart.js";
 import type { Point } from "./geometry.js";
 import { accent, lineStyle } from "./palette.js";
-import type { LabelPlace } from "./place-line-labels.js";
+import { keySample, type LabelPlace } from "./place-line-labels.js";
 
 export const labelSize = 10;
 export const labelHeight = 13;
@@ -86,17 +87,26 @@ export function depthMarks(
   ];
 }
 
+/** A dashed line at each value, and its name below, moved if names would touch. */
 export function valueMarkLayers(
   marks: NonNullable<DepthChart["valueMarks"]>,
   atX: (value: number) => number,
-  plotHeight: number,
+  room: { left: number; right: number; plotWidth: number; plotHeight: number },
 ): readonly Layer[] {
   if (marks.length === 0) return [];
-  const values = marks.map((mark) => ({
+  const middles = spread(
+    marks.map((mark) => ({
+      wanted: atX(mark.value),
+      height: textWidth({ text: mark.label, size: labelSize }),
+    })),
+    { from: 4 - room.left, to: room.plotWidth + room.right, gap: 10 },
+  );
+  const values = marks.map((mark, i) => ({
     label: mark.label,
     x: atX(mark.value),
+    xLabel: middles[i] ?? 0,
     y: 0,
-    yEnd: plotHeight,
+    yEnd: room.plotHeight,
   }));
   return [
     {
@@ -106,9 +116,10 @@ export function valueMarkLayers(
       encoding: { x: pixels("x"), y: pixels("y"), y2: { field: "yEnd" } },
     },
     {
+      name: "value-mark-labels",
       data: { values },
       mark: { type: "text", baseline: "top", dy: 4, color: accent, fontSize: labelSize },
-      encoding: { x: pixels("x"), y: pixels("yEnd"), text: { field: "label" } },
+      encoding: { x: pixels("xLabel"), y: pixels("yEnd"), text: { field: "label" } },
     },
   ];
 }
@@ -135,7 +146,7 @@ export function lineLabel(place: LabelPlace, text: string, i: number): readonly 
   }
   if (place.isKey) {
     const sample: readonly [Point, Point] = [
-      [box.left - 26, y],
+      [box.left - keySample, y],
       [box.left - 5, y],
     ];
     layers.push(

@@ -1,10 +1,11 @@
 import { InputError } from "../../errors/index.js";
+import { formatNumber } from "../../units/index.js";
 import { textWidth } from "../lettering/text-width.js";
-import type { ChartSpec } from "./chart-spec.js";
+import type { ChartSpec, ChartValue } from "./chart-spec.js";
 import { chartTheme, numberLabel } from "./chart-theme.js";
 import { checkDepthChart } from "./check-depth-chart.js";
 import type { Box, Point } from "./geometry.js";
-import { niceRange, niceTicks } from "./nice-ticks.js";
+import { niceRange, niceTicks, type Ticks } from "./nice-ticks.js";
 import {
   depthMarks,
   labelHeight,
@@ -89,10 +90,7 @@ export function depthChart(chart: DepthChart): ChartSpec {
     axis: {
       orient: "top",
       title: chart.xTitle,
-      values: [...xTicks.values],
-      format: `,.${xTicks.decimals}f`,
-      labelExpr: numberLabel,
-      labelOverlap: false,
+      ...ticked(xTicks),
     },
   };
   const y = {
@@ -101,10 +99,7 @@ export function depthChart(chart: DepthChart): ChartSpec {
     scale: { domain: [...depthRange], reverse: true, nice: false, zero: false },
     axis: {
       title: chart.depthTitle,
-      values: [...depthTicks.values],
-      format: `,.${depthTicks.decimals}f`,
-      labelExpr: numberLabel,
-      labelOverlap: false,
+      ...ticked(depthTicks),
       // Vega would measure the labels without knowing the font.
       titleX: -(tickWidth + 16),
     },
@@ -114,12 +109,15 @@ export function depthChart(chart: DepthChart): ChartSpec {
     points: visiblePart(s, depthRange).map(([value, depth]): Point => [atX(value), atDepth(depth)]),
     labelWidth: textWidth({ text: s.label, size, isSemibold: true }),
   }));
+  const ends = sections
+    .flatMap(({ top, base }) => [top, base])
+    .filter((d) => d > depthRange[0] && d < depthRange[1]);
   const taken: readonly Box[] = [
-    ...marks.map((m) => ({
+    ...[...marks.map((m) => m.depth), ...ends].map((d) => ({
       left: 0,
       right: plotWidth,
-      top: atDepth(m.depth),
-      bottom: atDepth(m.depth),
+      top: atDepth(d),
+      bottom: atDepth(d),
     })),
     ...valueMarks.map((m) => ({
       left: atX(m.value),
@@ -128,10 +126,8 @@ export function depthChart(chart: DepthChart): ChartSpec {
       bottom: plotHeight,
     })),
   ];
-  const placed = placeLineLabels({ lines, area, labelHeight, taken });
-  const ends = sections
-    .flatMap(({ top, base }) => [top, base])
-    .filter((d) => d > depthRange[0] && d < depthRange[1]);
+  const keyTop = plotHeight + (valueMarks.length > 0 ? labelHeight + 8 : 6);
+  const placed = placeLineLabels({ lines, area, labelHeight, taken, keyTop });
 
   return {
     $schema: "https://vega.github.io/schema/vega-lite/v6.json",
@@ -144,7 +140,7 @@ export function depthChart(chart: DepthChart): ChartSpec {
     layer: [
       ...sectionEnds([...new Set(ends)], { y }),
       ...depthMarks(marks, atDepth, { plotWidth, plotHeight }),
-      ...valueMarkLayers(valueMarks, atX, plotHeight),
+      ...valueMarkLayers(valueMarks, atX, { left, right, plotWidth, plotHeight }),
       ...series.map((s, i) => seriesLayer(s, i, { x, y })),
       ...placed.flatMap((place, i) => lineLabel(place, series[i]?.label ?? "", i)),
     ],
@@ -155,6 +151,23 @@ const scale =
   ([from, to]: readonly [number, number], length: number) =>
   (v: number): number =>
     Math.round(((v - from) / (to - from)) * length * 100) / 100;
+
+/** Ticks for an axis, their labels written out where the format of the axis has no powers of ten. */
+function ticked(ticks: Ticks): { readonly [key: string]: ChartValue } {
+  const largest = Math.max(...ticks.values.map(Math.abs));
+  const isPlain = ticks.step >= 1e-4 && largest < 1e7;
+  const digits = 1 + Math.round(Math.log10(largest / ticks.step));
+  const written = ticks.values
+    .map((v) => `datum.value === ${v} ? '${formatNumber(v, digits)}' : `)
+    .join("");
+  return {
+    values: [...ticks.values],
+    labelOverlap: false,
+    ...(isPlain
+      ? { format: `,.${ticks.decimals}f`, labelExpr: numberLabel }
+      : { labelExpr: `${written}datum.label` }),
+  };
+}
 
 /** The points within the depth range, cut exactly at its ends. */
 function visiblePart(s: DepthSeries, [top, bottom]: readonly [number, number]): readonly Point[] {

@@ -1,6 +1,8 @@
 import { InputError } from "../../errors/index.js";
 
 export interface Ticks {
+  /** The nth multiple of the step, without the error that multiplying adds. */
+  readonly multiple: (n: number) => number;
   readonly values: readonly number[];
   readonly step: number;
   /** As many as the step needs. */
@@ -30,7 +32,7 @@ export function niceTicks([from, to]: readonly [number, number], count: number):
   const values: number[] = [];
   for (let n = Math.ceil(from / step - slack); n <= Math.floor(to / step + slack); n++)
     values.push(value(n) + 0); // no −0
-  return { values, step, decimals: Math.max(0, -digits) };
+  return { multiple: value, values, step, decimals: Math.max(0, -digits) };
 }
 
 /** A range widened to the round numbers around it; a single value gets room on both sides. */
@@ -46,7 +48,10 @@ export function niceRange(values: readonly number[], count: number): readonly [n
     from -= room;
     to += room;
   }
-  const { step } = niceTicks([from, to], count);
+  const { step, multiple } = niceTicks([from, to], count);
   const slack = 1e-9;
-  return [Math.floor(from / step + slack) * step, Math.ceil(to / step - slack) * step];
+  return [
+    multiple(Math.floor(from / step + slack)) + 0,
+    multiple(Math.ceil(to / step - slack)) + 0,
+  ];
 }

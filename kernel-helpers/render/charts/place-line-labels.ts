@@ -7,47 +7,97 @@ export interface LabelledLine {
 
 export interface LabelPlace {
   readonly box: Box;
-  /** From the line to the label, if they stand apart. */
+  /** From the line to the label, level, if they stand apart. */
   readonly leader: readonly [Point, Point] | null;
-  /** Set below the plot for want of room, where it needs a sample of its line. */
+  /** Away from its line for want of room, and so with a sample of the line before it. */
   readonly isKey: boolean;
 }
 
 const places = 25;
 const gaps = [5, 18, 36, 60, 90];
 const clearance = 2;
+/** The length of the sample of a line in a key, with the space after it. */
+export const keySample = 26;
+// A label over a line, or a leader over three, is worse than a key.
+const worstCost = 65;
 
 /**
- * Where each line's name goes: beside its line, in the plot, over no other name; over a line only if
- * there is no other way, and never where another line is nearer. All in pixels.
+ * Where each line's name goes: beside its line, in the plot, over no other name or line; where that
+ * cannot be done, in a key in a free corner, or below the plot. All in pixels.
  */
 export function placeLineLabels({
   lines,
   area,
   labelHeight,
   taken,
+  keyTop,
 }: {
   lines: readonly LabelledLine[];
   area: Box;
   labelHeight: number;
+  /** Where no name may stand. */
   taken: readonly Box[];
+  /** Where a key below the plot begins. */
+  keyTop: number;
 }): readonly LabelPlace[] {
-  const used: Box[] = [...taken];
-  let keys = 0;
-  return lines.map((line, own) => {
+  const used: Box[] = [];
+  const isFree = (box: Box, gap: number): boolean =>
+    !used.some((other) => overlaps(box, other, gap));
+  const beside = lines.map((line, own) => {
     let best: { place: LabelPlace; cost: number } | null = null;
     for (const candidate of candidates(line, labelHeight)) {
-      if (best && candidate.cost >= best.cost) continue;
-      const { box } = candidate.place;
-      if (!isInside(box, area) || used.some((other) => overlaps(box, other, clearance))) continue;
+      if (candidate.cost >= (best?.cost ?? worstCost)) continue;
+      const { box, leader } = candidate.place;
+      if (!isInside(box, area) || !isFree(box, clearance)) continue;
+      if (taken.some((other) => overlaps(box, other, clearance))) continue;
+      if (leader && !isFree(boxOf(leader), 1)) continue;
       const cost = candidate.cost + costOfLines(candidate, lines, own);
-      if (!best || cost < best.cost) best = { place: candidate.place, cost };
+      if (cost < (best?.cost ?? worstCost)) best = { place: candidate.place, cost };
     }
-    const place =
-      best && best.cost < Infinity ? best.place : keyPlace(line, area, labelHeight, keys++);
-    used.push(place.box);
-    return place;
+    if (best) used.push(best.place.box, ...(best.place.leader ? [boxOf(best.place.leader)] : []));
+    return best?.place ?? null;
   });
+
+  const left = lines.filter((_, i) => beside[i] === null);
+  const row = labelHeight + clearance;
+  const width = keySample + Math.max(0, ...left.map((line) => line.labelWidth));
+  const corner = corners(area, { width, height: left.length * row }).find(
+    (block) =>
+      isFree(block, clearance) &&
+      !taken.some((other) => overlaps(block, other)) &&
+      lines.every((line) => distanceToLine(block, line.points, 3) >= 3),
+  );
+  const from = corner ?? { left: area.left, top: keyTop };
+  let keys = 0;
+  return lines.map((line, i) => {
+    const place = beside[i];
+    if (place) return place;
+    const top = from.top + keys++ * row;
+    const start = from.left + keySample;
+    const box = { left: start, right: start + line.labelWidth, top, bottom: top + labelHeight };
+    return { box, leader: null, isKey: true };
+  });
+}
+
+const boxOf = ([[ax, ay], [bx, by]]: readonly [Point, Point]): Box => ({
+  left: Math.min(ax, bx),
+  right: Math.max(ax, bx),
+  top: Math.min(ay, by),
+  bottom: Math.max(ay, by),
+});
+
+/** Blocks in the corners of an area that can hold them, the lower left first. */
+function corners(area: Box, { width, height }: { width: number; height: number }): readonly Box[] {
+  const inset = 6;
+  const [left, right] = [area.left + inset, area.right - inset - width];
+  const [top, bottom] = [area.top + inset, area.bottom - inset - height];
+  if (left > right || top > bottom) return [];
+  return [
+    [left, bottom],
+    [right, top],
+    [right, bottom],
+    [left, top],
+  ].map(([x = 0, y = 0]) => ({ left: x, right: x + width, top: y, bottom: y + height }));
 }
 
 interface Candidate {
@@ -111,6 +161,10 @@ function costOfLines(
     // Without a leader the nearest line must be the one that is named, clearly.
     else if (!place.leader && distance < gap + 6) cost += distance <= gap + 1 ? 80 : 12;
     else if (place.leader) {
+      // Where lines run together a leader cannot tell which one it begins at.
+      const [x, y] = place.leader[0];
+      const end = { left: x, right: x, top: y, bottom: y };
+      if (distanceToLine(end, line.points, 4) < 4) cost += 40;
       // A label that touches a line seems to belong to it, whatever its leader says.
       if (distance < 9) cost += 15;
       const [[ax, ay], [bx]] = place.leader;
@@ -124,16 +178,4 @@ function costOfLines(
     }
   }
   return cost;
-}
-
-const keySample = 26;
-
-function keyPlace(line: LabelledLine, area: Box, height: number, row: number): LabelPlace {
-  const left = area.left + keySample;
-  const top = area.bottom + 6 + row * (height + clearance);
-  return {
-    box: { left, right: left + line.labelWidth, top, bottom: top + height },
-    leader: null,
-    isKey: true,
-  };
 }

@@ -17,12 +17,15 @@ const gap = 3;
 /** Labels in one column beside the well, none over another, each joined to its place by a leader. */
 export function placeSketchLabels({
   labels,
+  turn,
   column,
   right,
   plotTop,
   plotBottom,
 }: {
   labels: readonly SketchLabel[];
+  /** Right of the well, where leaders turn towards their labels. */
+  turn: number;
   column: number;
   right: number;
   plotTop: number;
@@ -43,7 +46,9 @@ export function placeSketchLabels({
     const leader = path(
       [
         [x0 + 2, y0],
-        [column - 10, y],
+        // Level up to one line for all, so that no leader crosses another.
+        [turn, y0],
+        [column - 8, y],
         [column - 4, y],
       ],
       {

@@ -88,7 +88,7 @@ export function wellSketch(sketch: WellSketch): string {
           { text: "Seabed", from: [outermost + 4, atDepth(sketch.seabed)] as const, isMark: false },
         ]),
   ];
-  const column = outermost + 26;
+  const column = outermost + 30;
   const content = [
     ...(sketch.seabed === undefined
       ? []
@@ -115,7 +115,14 @@ export function wellSketch(sketch: WellSketch): string {
           plotBottom,
           unit: sketch.depthUnit,
         })),
-    ...placeSketchLabels({ labels, column, right: width, plotTop, plotBottom }),
+    ...placeSketchLabels({
+      labels,
+      turn: outermost + 8,
+      column,
+      right: width,
+      plotTop,
+      plotBottom,
+    }),
     label(
       {
         text: scaleNote(pixelsPerDiameter / pixelsPerDepth, sketch.diameterInDepthUnits),

@@ -1,4 +1,5 @@
-import { readFileSync, readdirSync } from "node:fs";
+import { readFileSync, readdirSync, writeFileSync } from "node:fs";
+import { join } from "node:path";
 import { afterAll, describe, expect, it } from "vitest";
 import { RenderError } from "../../../kernel-helpers/errors/index.js";
 import { withBrowser, type BrowserSession } from "../../../kernel-helpers/render/browser/index.js";
@@ -197,6 +198,20 @@ describe.each(browsers)("the $kind browser", (browser) => {
     expect(readdirSync(folder).filter((name) => name.startsWith("puppeteer"))).toEqual([]);
   });
 });
+
+const shipped = browsers.find((browser) => browser.kind === "shipped");
+if (shipped)
+  it("a page printed without any font is refused", async () => {
+    const empty = join(folder, "empty.conf");
+    const cache = `<cachedir>${join(folder, "fontconfig")}</cachedir>`;
+    writeFileSync(empty, `<?xml version="1.0"?><fontconfig>${cache}</fontconfig>`);
+    const browser = { ...shipped, env: { ...shipped.env, FONTCONFIG_FILE: empty } };
+    const print = withBrowser(
+      (session) => printPdf({ html: "<!doctype html><title>t</title><p>text", session, info }),
+      { env, browser },
+    );
+    await expect(print).rejects.toMatchObject({ code: "no-text" });
+  });
 
 describe("a browser that does not start", () => {
   it("is reported with its path and what it said", async () => {

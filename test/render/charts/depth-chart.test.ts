@@ -29,7 +29,6 @@ const given: DepthChart = {
   plotBottom: 460,
 };
 
-type Tree = Exclude<ChartValue, null | string | number | boolean>;
 function at(spec: ChartSpec, ...path: (string | number)[]): ChartValue {
   let value: ChartValue = spec;
   for (const key of path) {
@@ -96,6 +95,26 @@ describe("a depth chart", () => {
   });
   it("draws only the section ends that lie within", () => {
     expect(rowsOf(spec, "section-ends")).toEqual([{ depth: 2500 }]);
+  });
+  it("parts the names of values that lie close together", () => {
+    const close = depthChart({
+      ...given,
+      valueMarks: [
+        { value: 50, label: "one limit" },
+        { value: 50.5, label: "the other limit" },
+      ],
+    });
+    const [a, b] = rowsOf(close, "value-marks");
+    expect(Number(there(b)["x"]) - Number(there(a)["x"])).toBeLessThan(10);
+    expect(Number(there(b)["xLabel"]) - Number(there(a)["xLabel"])).toBeGreaterThan(50);
+  });
+  it("writes very small values as powers of ten", () => {
+    const small = depthChart({
+      ...given,
+      series: [{ label: "leak", depth, value: depth.map((d) => d * 1e-8) }],
+      valueMarks: [],
+    });
+    expect(JSON.stringify(small)).toContain("datum.value === 0.00002 ? '2.0 × 10⁻⁵'");
   });
   it("takes the value range it is given", () => {
     const fixed = depthChart({ ...given, xRange: [0, 100] });

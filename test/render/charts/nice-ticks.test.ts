@@ -4,7 +4,7 @@ import { niceRange, niceTicks } from "../../../kernel-helpers/render/charts/nice
 
 describe("ticks", () => {
   it("are exact round numbers", () => {
-    expect(niceTicks([0, 1], 5)).toEqual({
+    expect(niceTicks([0, 1], 5)).toMatchObject({
       values: [0, 0.2, 0.4, 0.6, 0.8, 1],
       step: 0.2,
       decimals: 1,
@@ -45,6 +45,11 @@ describe("ticks", () => {
 describe("a range of round numbers", () => {
   it("holds all values", () => {
     expect(niceRange([13.2, 58.7, 20], 5)).toEqual([10, 60]);
+  });
+  it("ends on its own ticks, however small they are", () => {
+    const range = niceRange([1e-5, 1.99e-5], 5);
+    expect(range).toEqual([0.00001, 0.00002]);
+    expect(niceTicks(range, 5).values.at(-1)).toBe(0.00002);
   });
   it("gives room to a single value", () => {
     expect(niceRange([0], 4)).toEqual([-1, 1]);

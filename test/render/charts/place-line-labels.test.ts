@@ -18,6 +18,7 @@ const place = (lines: readonly (readonly Point[])[], labelWidth = 50) =>
     area,
     labelHeight: 13,
     taken: [],
+    keyTop: 406,
   });
 
 describe("the names of lines", () => {
@@ -41,6 +42,15 @@ describe("the names of lines", () => {
       if (p.leader) expect(lines[i]).toContainEqual(p.leader[0]);
     });
   });
+  it("go into a key in a free corner where lines run together all along", () => {
+    const together = [0, 1, 2, 3, 4].map((k) => straight(140 + k, 160 + k));
+    const keys = place(together).filter((p) => p.isKey);
+    expect(keys.length).toBeGreaterThan(1);
+    for (const p of keys) {
+      expect(isInside(p.box, area)).toBe(true);
+      for (const points of together) expect(distanceToLine(p.box, points, 50)).toBeGreaterThan(2);
+    }
+  });
   it("go below the plot, one under the other, if there is no room at all", () => {
     const places = place([straight(100, 110), straight(200, 210)], 400);
     expect(places.map((p) => p.isKey)).toEqual([true, true]);
@@ -53,6 +63,7 @@ describe("the names of lines", () => {
       area,
       labelHeight: 13,
       taken,
+      keyTop: 406,
     });
     expect(there(p).box.top).toBeGreaterThan(200);
   });
