@@ -56,7 +56,7 @@ export async function withBrowser<T>(
     return await Promise.race([use(session), end.reached]);
   } catch (error) {
     signal?.throwIfAborted();
-    if (started.connected || error instanceof RenderError) throw error;
+    if (error instanceof RenderError || (started.connected && !end.isReached())) throw error;
     throw new RenderError({
       code: "browser-stopped",
       where: found.executable,
@@ -74,7 +74,11 @@ export async function withBrowser<T>(
 function endOf(
   started: PuppeteerBrowser,
   signal: AbortSignal | undefined,
-): { readonly reached: Promise<never>; readonly forget: () => void } {
+): {
+  readonly reached: Promise<never>;
+  readonly isReached: () => boolean;
+  readonly forget: () => void;
+} {
   const child = started.process();
   const ended = new AbortController();
   const onExit = (): void => ended.abort(new Error("the browser has ended"));
@@ -90,6 +94,7 @@ function endOf(
   reached.catch(() => undefined);
   return {
     reached,
+    isReached: () => ended.signal.aborted,
     forget: () => {
       child?.off("exit", onExit);
       signal?.removeEventListener("abort", onAbort);
