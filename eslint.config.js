@@ -8,6 +8,7 @@ export default tseslint.config(
       "out/**",
       "kernel-helpers/vendor/**",
       "notebooks/**",
+      "test/types/**",
     ],
   },
   ...tseslint.configs.strictTypeChecked.map((c) => ({ ...c, files: ["**/*.ts"] })),
@@ -30,6 +31,8 @@ export default tseslint.config(
         { ignoreVoidOperator: true, ignoreArrowShorthand: true },
       ],
       "@typescript-eslint/no-unnecessary-type-parameters": "off",
+      "@typescript-eslint/no-meaningless-void-operator": "off",
+      "@typescript-eslint/no-unused-expressions": ["error", { allowTaggedTemplates: true }],
     },
   },
   {

@@ -30,7 +30,7 @@ export function figureView(ctx: Context, item: Figure, charts: readonly Chart[])
       return { ...base, drawing: null, alternative: null, stop: `Not drawn: ${r.because}.` };
     values[name] = r.value;
   }
-  const { drawing, columns } = found.draw(values as never, ctx.system);
+  const { drawing, columns } = found.draw(values, ctx.system);
   const rows = telling(columns);
   const kept = thin(rows.length, MOST_ROWS).map((i) => rows[i] ?? 0);
   return {

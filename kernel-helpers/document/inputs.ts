@@ -1,6 +1,7 @@
 import type { Stated } from "../study/index.js";
 import { formatTyped, unitOf } from "../units/index.js";
 import type { Context } from "./context.js";
+import { textOf } from "./show.js";
 import type { AssumptionView, InputView } from "./view.js";
 
 /** A stated value as it was typed, with its source and what uses it. */
@@ -28,8 +29,7 @@ export function inputView(ctx: Context, item: Stated): InputView {
         `${formatTyped(item.spread.low)} to ${formatTyped(item.spread.high)}${unit && ` ${unit}`} (${item.spread.says})`,
     };
   }
-  if (item.form === "choice")
-    return { ...base, value: String(item.result.value as string), unit: "" };
+  if (item.form === "choice") return { ...base, value: textOf(item.result.value), unit: "" };
   const { text } = ctx.show({ type: item.type, value: item.result.value });
   return {
     ...base,

@@ -1,5 +1,6 @@
 import type { AppliedUse, Body, DeclaredMethod } from "../study/index.js";
 import { isKind } from "../units/index.js";
+import { textOf } from "./show.js";
 
 /**
  * Methods that took part in items of a record: those of steps, those that models evaluated, and those
@@ -48,7 +49,7 @@ function choicesOf(body: Body, item: AppliedUse): ReadonlySet<string> {
   const recorded = new Map(
     body.items.flatMap((i) =>
       (i.op === "given" || i.op === "assumed") && i.form === "choice"
-        ? [[i.id, String(i.result.value as string)] as const]
+        ? [[i.id, textOf(i.result.value)] as const]
         : [],
     ),
   );

@@ -1,10 +1,4 @@
-import {
-  isStated,
-  type AppliedUse,
-  type DeclaredMethod,
-  type Item,
-  type StudyRecord,
-} from "../study/index.js";
+import { isStated, type DeclaredMethod, type Item, type StudyRecord } from "../study/index.js";
 import { cautionsOf } from "./cautions.js";
 import { checkView } from "./checks.js";
 import { conclusionView } from "./conclusions.js";
@@ -63,7 +57,7 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
         return stepView(ctx, item, numberOf.get(item.use) ?? "");
       case "run":
       case "entity":
-        return objectView(ctx, item, numberOf.get((item as AppliedUse).use) ?? null);
+        return objectView(ctx, item, numberOf.get(item.use) ?? null);
       case "formula":
         return formulaView(ctx, item);
       case "compare":

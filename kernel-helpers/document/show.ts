@@ -33,7 +33,7 @@ export function showNumber(
   return { text: formatNumber(inUnit(si as never, u), DIGITS), unit: symbolOf(u) };
 }
 export const joined = ({ text, unit }: ShownValue): string =>
-  unit === "" ? text : unit === "%" || unit === "°" ? `${text}${unit}` : `${text}\u00a0${unit}`;
+  unit === "" ? text : unit === "°" ? `${text}${unit}` : `${text}\u00a0${unit}`;
 
 /** A column of numbers in one unit, all with the same decimals, so that the decimal points line up. */
 export function showColumn(
@@ -57,6 +57,10 @@ export function showColumn(
   };
 }
 
+/** The text of a choice or a text. */
+export const textOf = (value: PlainJson): string =>
+  typeof value === "string" ? value : JSON.stringify(value);
+
 /** Any recorded value in one line. */
 export function showValue(
   type: TypeJson,
@@ -69,7 +73,7 @@ export function showValue(
   switch (type.type) {
     case "oneOf":
     case "text":
-      return { text: String(value as string), unit: "" };
+      return { text: textOf(value), unit: "" };
     case "optional":
       return showValue(type.of, value, system, unit);
     case "list":

@@ -1,6 +1,6 @@
 import { formulaToTex, parseFormula } from "../method/index.js";
 import type { AppliedUse, FormulaItem, Item, Result, TypeJson } from "../study/index.js";
-import { isKind, kinds, type Kind } from "../units/index.js";
+import { isKind, kinds } from "../units/index.js";
 import { words, type Context } from "./context.js";
 import { equationOf, putInOf } from "./equation-of.js";
 import { saysOf, stopText } from "./item-texts.js";
@@ -69,7 +69,7 @@ export function formulaView(ctx: Context, item: FormulaItem): StepView {
       const from = node && "ref" in node ? ctx.resolver.item(node.ref) : null;
       const symbol =
         (node && "ref" in node && node.path.length === 0 ? from?.symbol : null) ?? nameTex(n);
-      return [n, { type: kind as Kind, symbol, note: from?.title ?? words(n) }];
+      return [n, { type: kind, symbol, note: from?.title ?? words(n) }];
     }),
   );
   const symbolOf = (n: string): string => fields[n]?.symbol ?? nameTex(n);

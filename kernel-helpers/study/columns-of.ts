@@ -91,7 +91,7 @@ function column(
   if (isKind(inner)) return numbers(head, inner, values as readonly (number | null)[], system);
   return {
     head,
-    values: values.map((x) => (x === null || x === undefined ? null : String(x as string))),
+    values: values.map((x) => (x === null || x === undefined ? null : (x as string))),
   };
 }
 

@@ -13,9 +13,14 @@ export interface Done {
   readonly diagnostics: { readonly [name: string]: number | string };
 }
 
-/** Thrown by `get` when an input ended without a value: the outcome travels on, it never becomes a number. */
-export class Blocked {
-  constructor(readonly by: string) {}
+/**
+ * Thrown by `get` when an input ended without a value: the outcome travels on, it never becomes a number.
+ * An error only so that it can be thrown: nobody sees it.
+ */
+export class Blocked extends Error {
+  constructor(readonly by: string) {
+    super(by);
+  }
 }
 
 /** The one evaluator, for recording and for replay. */
@@ -32,7 +37,7 @@ export function evaluate(
         decode(f.kind, args[n] ?? { absent: true }, get, `${id}.${n}`),
       ]),
     );
-    const { live, findings, looked, diagnostics } = use.apply(values as never);
+    const { live, findings, looked, diagnostics } = use.apply(values);
     const result: Result = isStop(live)
       ? { stop: live.stop, because: live.because }
       : { value: plain(use.output, live, id) };

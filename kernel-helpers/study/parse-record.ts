@@ -10,7 +10,7 @@ import type { TypeJson } from "./type-json.js";
 export const SCHEMA = 1;
 
 const kind = z.enum(Object.keys(kinds) as [Kind, ...Kind[]]);
-const finite = z.number().finite();
+const finite = z.number();
 const id = z.string().regex(/^[A-Za-z][A-Za-z0-9_.-]*$/);
 const named = <T extends z.ZodType>(of: T) => z.record(z.string(), of);
 

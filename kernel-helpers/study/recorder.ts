@@ -36,12 +36,8 @@ export class Recorder {
     notes: Named,
   ): Ref<Type> {
     this.sheet.ledger.admit(id);
-    const { args, done } = this.evaluate(
-      id,
-      use as unknown as Use,
-      wires as { readonly [name: string]: unknown },
-    );
-    this.sheet.uses.set(use.id, use as unknown as Use);
+    const { args, done } = this.evaluate(id, use, wires as { readonly [name: string]: unknown });
+    this.sheet.uses.set(use.id, use);
     return this.keep(
       {
         ...this.common(id, notes),

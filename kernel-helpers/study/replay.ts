@@ -103,7 +103,7 @@ function evaluateItem(
     return {
       type,
       live,
-      result: { value: live as PlainJson },
+      result: { value: live },
       findings: [],
       looked: [],
       diagnostics: {},
@@ -115,9 +115,8 @@ function evaluateItem(
 /** The use that an item was made with; a named error when this version does not have it, or has another revision. */
 export function useOf(item: Extract<Item, { args: unknown }>, registry: Registry): Use {
   if (item.op === "formula") return formulaUse(item.id, item.text, item.kinds, item.type as never);
-  if (item.op === "compare") return compareUse(item.of) as unknown as Use;
-  if (item.op === "check")
-    return checkUse(liveType(item.of, registry), item.sense) as unknown as Use;
+  if (item.op === "compare") return compareUse(item.of);
+  if (item.op === "check") return checkUse(liveType(item.of, registry), item.sense);
   if (item.op === "figure")
     throw new StudyError({
       code: "no-value",

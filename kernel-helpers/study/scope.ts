@@ -9,7 +9,15 @@ import type { Node } from "./node.js";
 import type { AssumedNotes, CheckNotes, FileOf, GivenNotes, Named } from "./notes.js";
 import { Recorder } from "./recorder.js";
 import { typeJson } from "./type-json.js";
-import { isRef, type FieldsOf, type Ref, type Shown, type Wired, type Wires } from "./wires.js";
+import {
+  isRef,
+  type AnyRef,
+  type FieldsOf,
+  type Ref,
+  type Shown,
+  type Wired,
+  type Wires,
+} from "./wires.js";
 
 /** A part of a study that records: the study itself, or one of its sections. */
 export class Scope extends Recorder {
@@ -89,7 +97,7 @@ export class Scope extends Recorder {
   formula<K extends Kind>(
     id: string,
     text: string,
-    args: { readonly [name: string]: Ref<Kind> | QuantityInput<"dimensionless"> },
+    args: { readonly [name: string]: AnyRef<Kind> | QuantityInput<"dimensionless"> },
     kind: K,
     notes: Named = {},
   ): Ref<K> {
@@ -192,7 +200,7 @@ export class Scope extends Recorder {
   conclude(
     id: string,
     notes: Named & { readonly checks: readonly Ref<Verdict>[] },
-  ): (words: TemplateStringsArray, ...values: readonly (Ref<Type> | Shown | string)[]) => void {
+  ): (words: TemplateStringsArray, ...values: readonly (AnyRef<Type> | Shown | string)[]) => void {
     return (words, ...values) => {
       const parts = words.flatMap((w, i) => {
         const v = values[i];
@@ -225,7 +233,7 @@ export class Scope extends Recorder {
     args: Wires<S>,
     notes: Named & { readonly caption: string },
   ): void {
-    const nodes = this.encodeAll(id, chart.inputs, args as { readonly [name: string]: unknown });
+    const nodes = this.encodeAll(id, chart.inputs, args);
     this.keep(
       {
         ...this.common(id, notes),
@@ -246,7 +254,7 @@ export class Scope extends Recorder {
       readonly caption: string;
       readonly columns: readonly {
         readonly head: string;
-        readonly of: Ref<Type> | readonly (Ref<Type> | string)[];
+        readonly of: AnyRef<Type> | readonly (AnyRef<Type> | string)[];
         readonly unit?: Unit<Kind>;
       }[];
     },
@@ -257,7 +265,7 @@ export class Scope extends Recorder {
       unit: unit?.symbol ?? null,
       of: isRef(of)
         ? encode(of.__ref, of, `${id}.${head}`, owns)
-        : (of as readonly (Ref<Type> | string)[]).map((x, i): Node =>
+        : of.map((x, i): Node =>
             typeof x === "string" ? { text: x } : encode(x.__ref, x, `${id}.${head}[${i}]`, owns),
           ),
     }));

@@ -14,7 +14,7 @@ const TURN = Symbol.for("stillwell.turn");
 const STUDIES = Symbol.for("stillwell.studies");
 const realm = globalThis as unknown as {
   [TURN]?: number;
-  [STUDIES]?: Map<string, { record(): unknown }>;
+  [STUDIES]: Map<string, { record(): unknown }> | undefined;
 };
 
 /** A recorded calculation: inputs, assumptions, methods, checks and conclusions, with every edge between them. */

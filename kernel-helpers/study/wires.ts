@@ -31,8 +31,10 @@ export interface Ref<T> {
   /** For texts: the same value, shown in a unit of the author's choice. */
   readonly in: T extends Kind ? (unit: Unit<T>) => Shown : never;
 }
+/** Any handle to something of a type, whatever can be done with it: what lists and sentences take. */
+export type AnyRef<T> = Pick<Ref<T>, "__ref" | "id" | "path" | "value">;
 export interface Shown {
-  readonly shown: Ref<Type>;
+  readonly shown: AnyRef<Type>;
   readonly unit: string;
 }
 
@@ -72,5 +74,5 @@ export type Wires<F extends Shape> = {
 export type FieldsOf<E> = E extends Struct<infer _I, infer F, infer _V> ? F : never;
 
 /** By tag, not by class: the package may be loaded twice in one kernel. */
-export const isRef = (x: unknown): x is Ref<Type> =>
+export const isRef = (x: unknown): x is AnyRef<Type> =>
   typeof x === "object" && x !== null && "__ref" in x && "path" in x;

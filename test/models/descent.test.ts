@@ -60,7 +60,7 @@ describe("descent, against relations worked apart", () => {
     const v = (s: number): number => 1 + 0.01 * s;
     const { time } = fallTime(depth, depth.map(v));
     const ode = integrateOde({
-      rate: (_t, [s = 0]) => [v(s)],
+      rate: (_t, [s]) => [v(s)],
       from: 0,
       to: Math.log(3) / 0.01,
       start: [0],

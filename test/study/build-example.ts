@@ -1,5 +1,5 @@
 import { Study } from "../../kernel-helpers/study/index.js";
-import { cP, kgpm3, m, mm, mMD, MPa } from "../../kernel-helpers/units/index.js";
+import { cP, kgpm3, mm, mMD, MPa } from "../../kernel-helpers/units/index.js";
 import { Fluid, outflow, reynolds, Section } from "./example.js";
 
 /** One study that uses every way of recording. */
@@ -46,8 +46,7 @@ export function buildExample(id = "example") {
   const isFast = work.check("is-fast", q.at("verdict"), "is", "fast", { because: "it should be" });
   work.table("t", { caption: "Pressure", columns: [{ head: "pressure", of: q.at("pressure") }] });
   work.caution("care", "This is a test.");
-  s.conclude("c", {
-    checks: [fast, isFast],
-  })`At the shoe the pressure is ${q.at("pressure").at(shoe)}; Re is ${Re}.`;
+  const sentence = s.conclude("c", { checks: [fast, isFast] });
+  sentence`At the shoe the pressure is ${q.at("pressure").at(shoe)}; Re is ${Re}.`;
   return { s, pr, rho, shoe, bore, oil, q, Re, double, fast, isFast };
 }

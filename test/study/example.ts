@@ -132,4 +132,4 @@ export const registry: Registry = [
   Inflow,
   reynolds,
   outflow,
-] as unknown as Registry;
+];

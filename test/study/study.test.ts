@@ -12,9 +12,11 @@ import { buildExample } from "./build-example.js";
 import { Fluid, Inflow, outflow, registry, reynolds } from "./example.js";
 
 const TURN = Symbol.for("stillwell.turn");
-const realm = globalThis as unknown as { [TURN]?: number };
+const realm = globalThis as unknown as { [TURN]?: number | undefined };
 const turn = (n: number) => (realm[TURN] = n);
-afterEach(() => delete realm[TURN]);
+afterEach(() => {
+  realm[TURN] = undefined;
+});
 const copy = (r: StudyRecord): StudyRecord => JSON.parse(JSON.stringify(r)) as StudyRecord;
 
 describe("a recorded study", () => {
@@ -84,29 +86,35 @@ describe("a recorded study", () => {
   });
 });
 
+/** The findings of one recorded item. */
+const findingsOf = (record: StudyRecord, id: string) => {
+  const item = record.body.items.find((i) => i.id === id);
+  if (!item || !("findings" in item)) throw new Error(`${id} has no findings`);
+  return item.findings;
+};
+
 describe("findings", () => {
   it("tell a value outside the stated range, without an exception", () => {
-    const item = buildExample()
-      .s.record()
-      .body.items.find((i) => i.id === "Re") as { findings: { code: string; says: string }[] };
-    expect(item.findings.map((f) => f.code)).toEqual(["out-of-range"]);
-    expect(item.findings[0]?.says).toMatch(/test-reynolds: Re .*; stated range 1\.000 to 1000/);
+    const findings = findingsOf(buildExample().s.record(), "Re");
+    expect(findings.map((f) => f.code)).toEqual(["out-of-range"]);
+    expect(findings[0]?.says).toMatch(/test-reynolds: Re .*; stated range 1\.000 to 1000/);
   });
   it("merge over the depths of a model, with the worst and where it is", () => {
-    const item = buildExample()
-      .s.record()
-      .body.items.find((i) => i.id === "q") as { findings: { count: number[]; says: string }[] };
-    expect(item.findings).toHaveLength(1);
-    expect(item.findings[0]?.count).toEqual([2, 2]);
-    expect(item.findings[0]?.says).toContain("at 3000 m");
+    const findings = findingsOf(buildExample().s.record(), "q");
+    expect(findings).toHaveLength(1);
+    expect(findings[0]?.count).toEqual([2, 2]);
+    expect(findings[0]?.says).toContain("at 3000 m");
   });
   it("notice a number typed again where a reference belongs", () => {
     const { s, q, bore } = buildExample();
-    s.step("again", reynolds, { v: q.at("speed"), D: bore, density: kgpm3(850), viscosity: cP(1) });
-    const item = s.record().body.items.find((i) => i.id === "again") as {
-      findings: { code: string; says: string }[];
-    };
-    expect(item.findings.find((f) => f.code === "pass-the-reference")?.says).toContain('"rho"');
+    s.step("again", reynolds, {
+      v: q.at("speed"),
+      D: bore,
+      density: kgpm3(850),
+      viscosity: cP(1),
+    });
+    const found = findingsOf(s.record(), "again").find((f) => f.code === "pass-the-reference");
+    expect(found?.says).toContain('"rho"');
   });
 });
 

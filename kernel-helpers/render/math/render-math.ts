@@ -1,5 +1,6 @@
 import { RenderError } from "../../errors/index.js";
 import { escapeHtml } from "../lettering/escape-html.js";
+import { simpleMath } from "./simple-math.js";
 import { texToWords } from "./tex-to-words.js";
 
 export interface MathInput {
@@ -47,6 +48,9 @@ export async function mathRenderer(): Promise<MathRenderer> {
   return ({ tex, isDisplay, label }) => {
     const tag = isDisplay ? "div" : "span";
     const text = escapeHtml(label ?? texToWords(tex));
+    const simple = isDisplay ? null : simpleMath(tex);
+    if (simple !== null)
+      return `<span class="symbol" role="img" aria-label="${text}">${simple}</span>`;
     return `<${tag} class="math" role="img" aria-label="${text}">${set(tex, isDisplay)}</${tag}>`;
   };
 }

@@ -5,6 +5,7 @@ import { reference } from "../../method/index.js";
 import type { StudyRecord } from "../../study/index.js";
 import { formatReference } from "../citations/index.js";
 import { fontCss, mathCss } from "../fonts/index.js";
+import { typesetHtml } from "../lettering/index.js";
 import { mathRenderer } from "../math/index.js";
 import type { PaperSize } from "../pdf/page-css.js";
 import { contentsOf, exhibitsOf } from "./contents.js";
@@ -36,9 +37,14 @@ export async function renderHtml(record: StudyRecord, paper: PaperSize): Promise
     trimBlocks: true,
     lstripBlocks: true,
   });
-  const safe = (html: string): unknown => new nunjucks.runtime.SafeString(html);
+  const { SafeString } = nunjucks.runtime as { SafeString: new (html: string) => object };
+  const safe = (html: string): object => new SafeString(html);
   const numbers = new Map(view.references.map((r) => [r.id, r.number]));
-  environment.addFilter("math", (tex: string, isDisplay = false) => safe(math({ tex, isDisplay })));
+  environment.addFilter("math", (tex: string, isDisplay?: boolean) =>
+    safe(math({ tex, isDisplay: isDisplay === true })),
+  );
+  // Values and units: raised and lowered figures that the text faces lack become real ones.
+  environment.addFilter("set", (text: string) => safe(typesetHtml(text)));
   environment.addFilter("cite", (id: string) =>
     safe(`<a href="#ref-${id}">[${numbers.get(id) ?? "?"}]</a>`),
   );
