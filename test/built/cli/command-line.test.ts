@@ -96,9 +96,10 @@ describe("stillwell run", () => {
       { cwd: folder },
     );
     let err = "";
+    let asked = false;
     child.stderr.on("data", (b: Buffer) => {
       err += b.toString();
-      if (err.includes("cell 3 of 3")) child.kill("SIGINT");
+      if (err.includes("cell 3 of 3") && !asked) asked = child.kill("SIGINT");
     });
     const code = await new Promise((resolve) => child.on("exit", resolve));
     expect(code).toBe(130);

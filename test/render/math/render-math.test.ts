@@ -13,7 +13,14 @@ describe("an equation", () => {
     expect(html.match(/role=/g)).toHaveLength(1);
   });
   it("within a line is a span", async () => {
-    expect(await renderMath({ tex: "x", isDisplay: false })).toMatch(/^<span class="math"/);
+    expect(await renderMath({ tex: String.raw`\frac ab`, isDisplay: false })).toMatch(
+      /^<span class="math"/,
+    );
+  });
+  it("that is no more than a symbol is set plainly", async () => {
+    expect(await renderMath({ tex: String.raw`\rho_s`, isDisplay: false })).toBe(
+      '<span class="symbol" role="img" aria-label="rho sub s"><i>ρ</i><sub><i>s</i></sub></span>',
+    );
   });
   it("takes a text of its own, escaped", async () => {
     const html = await renderMath({ tex: "x", isDisplay: false, label: `"><script>` });
