@@ -8,8 +8,15 @@ import { fileURLToPath } from "node:url";
 const root = fileURLToPath(new URL("..", import.meta.url));
 const folder = mkdtempSync(join(tmpdir(), "stillwell-user-"));
 const run = (command, args, cwd = folder) => {
-  const r = spawnSync(command, args, { cwd, encoding: "utf8", shell: process.platform === "win32" });
-  if (r.status !== 0) throw new Error(`${command} ${args.join(" ")} ended with ${r.status}\n${r.stdout}\n${r.stderr}`);
+  const r = spawnSync(command, args, {
+    cwd,
+    encoding: "utf8",
+    shell: process.platform === "win32",
+  });
+  if (r.status !== 0)
+    throw new Error(
+      `${command} ${args.join(" ")} ended with ${r.status}\n${r.stdout}\n${r.stderr}`,
+    );
   return r.stdout;
 };
 const must = (isTrue, what) => {
@@ -17,11 +24,20 @@ const must = (isTrue, what) => {
   console.log(`  ${what}`);
 };
 try {
-  const packed = join(root, run(process.execPath, [join(root, "scripts", "pack.mjs")], root).trim().split("\n").at(-1));
+  const packed = join(
+    root,
+    run(process.execPath, [join(root, "scripts", "pack.mjs")], root)
+      .trim()
+      .split("\n")
+      .at(-1),
+  );
   must(existsSync(packed), "the package packs");
   writeFileSync(join(folder, ".npmrc"), "ignore-scripts=true\nfund=false\naudit=false\n");
   run("npm", ["install", "--loglevel=error", packed]);
-  must(existsSync(join(folder, "node_modules", "stillwell", "dist", "index.js")), "it installs in an empty folder");
+  must(
+    existsSync(join(folder, "node_modules", "stillwell", "dist", "index.js")),
+    "it installs in an empty folder",
+  );
   run("npx", ["--no-install", "stillwell", "new", ".", "--from", `file:${packed}`]);
   must(existsSync(join(folder, "study.ipynb")), "it makes a study there");
   const json = JSON.parse(readFileSync(join(folder, "package.json"), "utf8"));

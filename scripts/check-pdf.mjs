@@ -21,9 +21,21 @@ const must = (isTrue, what) => {
 };
 const stillwell = join(root, "kernel-helpers", "bin", "stillwell.mjs");
 try {
-  for (const [paper, size] of [["A4", "595.92 x 842.88"], ["Letter", "612 x 792"]]) {
+  for (const [paper, size] of [
+    ["A4", "595.92 x 842.88"],
+    ["Letter", "612 x 792"],
+  ]) {
     console.log(paper);
-    run(process.execPath, stillwell, "package", "notebooks/first-look.ipynb", "--out", folder, "--paper", paper);
+    run(
+      process.execPath,
+      stillwell,
+      "package",
+      "notebooks/first-look.ipynb",
+      "--out",
+      folder,
+      "--paper",
+      paper,
+    );
     const pdf = join(folder, "first-look", "package.pdf");
     const info = run("pdfinfo", pdf);
     const [w, h] = /Page size:\s+([\d.]+) x ([\d.]+)/.exec(info).slice(1).map(Number);
@@ -33,13 +45,26 @@ try {
     const pages = Number(/Pages:\s+(\d+)/.exec(info)[1]);
     const text = run("pdftotext", "-layout", pdf, "-");
     const sheets = text.split("\f").slice(0, pages);
-    must(sheets.every((t, i) => t.replace(/\s+/g, " ").includes(`Page ${i + 1} of ${pages}`)), `each of ${pages} pages says page n of N`);
-    must(sheets.every((t) => t.includes("LR4-CALC-001")), "each page carries the package number");
-    must(!/NaN|undefined|\[object|\\frac|\\mathrm/.test(text), "no NaN, undefined or raw TeX in the text");
+    must(
+      sheets.every((t, i) => t.replace(/\s+/g, " ").includes(`Page ${i + 1} of ${pages}`)),
+      `each of ${pages} pages says page n of N`,
+    );
+    must(
+      sheets.every((t) => t.includes("LR4-CALC-001")),
+      "each page carries the package number",
+    );
+    must(
+      !/NaN|undefined|\[object|\\frac|\\mathrm/.test(text),
+      "no NaN, undefined or raw TeX in the text",
+    );
     const structure = run("pdfinfo", "-struct", pdf);
-    for (const tag of ["H1", "H2", "Table", "TH", "Figure", "Link"]) must(new RegExp(`\\b${tag}\\b`).test(structure), `has ${tag} tags`);
+    for (const tag of ["H1", "H2", "Table", "TH", "Figure", "Link"])
+      must(new RegExp(`\\b${tag}\\b`).test(structure), `has ${tag} tags`);
     const fonts = run("pdffonts", pdf).split("\n").slice(2).filter(Boolean);
-    must(fonts.length > 0 && fonts.every((f) => /\byes yes\b|\byes\s+(yes|no)\b/.test(f)), `all ${fonts.length} fonts are embedded`);
+    must(
+      fonts.length > 0 && fonts.every((f) => /\byes yes\b|\byes\s+(yes|no)\b/.test(f)),
+      `all ${fonts.length} fonts are embedded`,
+    );
     cpSync(pdf, join(folder, `${paper}.pdf`));
   }
 } finally {

@@ -5,12 +5,30 @@ import { fileURLToPath } from "node:url";
 
 const root = fileURLToPath(new URL("..", import.meta.url));
 const run = (compiler, ...args) => {
-  const r = spawnSync(process.execPath, [`node_modules/${compiler}/bin/tsc`, ...args], { cwd: root, stdio: "inherit" });
+  const r = spawnSync(process.execPath, [`node_modules/${compiler}/bin/tsc`, ...args], {
+    cwd: root,
+    stdio: "inherit",
+  });
   if (r.status !== 0) process.exit(r.status ?? 1);
 };
 run("typescript", "-p", "kernel-helpers", "--noEmit");
 run("typescript", "-p", "test");
 for (const compiler of ["typescript", "typescript-5.0"]) {
   console.log(`refusals, ${compiler}`);
-  run(compiler, "--noEmit", "--strict", "--target", "es2022", "--module", "commonjs", "--moduleResolution", "node", "--skipLibCheck", "false", "--types", "node", "test/types/refused.test-d.ts");
+  run(
+    compiler,
+    "--noEmit",
+    "--strict",
+    "--target",
+    "es2022",
+    "--module",
+    "commonjs",
+    "--moduleResolution",
+    "node",
+    "--skipLibCheck",
+    "false",
+    "--types",
+    "node",
+    "test/types/refused.test-d.ts",
+  );
 }

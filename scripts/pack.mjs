@@ -9,13 +9,20 @@ const root = fileURLToPath(new URL("..", import.meta.url));
 const helpers = join(root, "kernel-helpers");
 const stage = mkdtempSync(join(tmpdir(), "stillwell-pack-"));
 try {
-  for (const part of ["bin", "dist", "starter", "vendor"]) cpSync(join(helpers, part), join(stage, part), { recursive: true });
+  for (const part of ["bin", "dist", "starter", "vendor"])
+    cpSync(join(helpers, part), join(stage, part), { recursive: true });
   rmSync(join(stage, "dist", ".ready"), { force: true });
   rmSync(join(stage, "dist", ".tsbuildinfo"), { force: true });
   cpSync(join(root, "templates"), join(stage, "templates"), { recursive: true });
-  for (const file of ["LICENSE", "README.md", "CHANGELOG.md"]) cpSync(join(root, file), join(stage, file));
-  const { devDependencies: _, ...json } = JSON.parse(readFileSync(join(helpers, "package.json"), "utf8"));
-  writeFileSync(join(stage, "package.json"), `${JSON.stringify({ ...json, files: ["bin", "dist", "starter", "vendor", "templates"] }, null, 2)}\n`);
+  for (const file of ["LICENSE", "README.md", "CHANGELOG.md"])
+    cpSync(join(root, file), join(stage, file));
+  const { devDependencies: _, ...json } = JSON.parse(
+    readFileSync(join(helpers, "package.json"), "utf8"),
+  );
+  writeFileSync(
+    join(stage, "package.json"),
+    `${JSON.stringify({ ...json, files: ["bin", "dist", "starter", "vendor", "templates"] }, null, 2)}\n`,
+  );
   const out = join(root, "out");
   mkdirSync(out, { recursive: true });
   const npm = process.env.npm_execpath;

@@ -194,8 +194,8 @@ const declaration = z.discriminatedUnion("role", [
   z.strictObject({ role: z.literal("entity"), ...declared }),
 ]);
 
-/** The published shape of a record; its JSON Schema follows from it. */
-export const recordSchema = z.strictObject({
+// Not exported: a notebook would have to load the whole type of it.
+const recordSchema = z.strictObject({
   schema: z.literal(SCHEMA),
   body: z.strictObject({
     study: z.strictObject({

@@ -125,11 +125,4 @@ export const outflow = model({
     };
   },
 });
-export const registry: Registry = [
-  Fluid,
-  Section,
-  Hole,
-  Inflow,
-  reynolds,
-  outflow,
-];
+export const registry: Registry = [Fluid, Section, Hole, Inflow, reynolds, outflow];
