@@ -190,7 +190,7 @@ export class Scope extends Recorder {
         args,
         type: typeJson(done.type),
         result: done.result,
-        findings: done.findings,
+        findings: [...done.findings, ...this.sheet.known.findings(args, id)],
       },
       done,
     ) as unknown as Ref<Verdict>;
