@@ -14,7 +14,7 @@ export interface LockedPage {
 // `document.fonts` itself can be hidden by an element of that name in the page.
 const fontsReady = `Object.getOwnPropertyDescriptor(Document.prototype, "fonts").get.call(document).ready.then(() => true)`;
 const loadTimeout = 60_000; // ms
-const printTimeout = 150_000; // ms
+const printTimeout = 600_000; // ms; a package of a thousand steps takes minutes on a slow machine
 
 /** The HTML is handed over as text: a file: address would give it the right to read other files. */
 export async function openLockedPage(browser: PuppeteerBrowser, html: string): Promise<LockedPage> {
@@ -23,6 +23,7 @@ export async function openLockedPage(browser: PuppeteerBrowser, html: string): P
   try {
     await page.setJavaScriptEnabled(false);
     await page.setRequestInterception(true);
+    await page.emulateMediaType("print");
     page.on("request", (request) => {
       const url = request.url();
       const isOwn = /^data:/i.test(url) || url === "about:blank";

@@ -16,6 +16,7 @@ export interface PuppeteerRequest {
 export interface PuppeteerPage {
   setJavaScriptEnabled(enabled: boolean): Promise<void>;
   setRequestInterception(enabled: boolean): Promise<void>;
+  emulateMediaType(type: "print"): Promise<void>;
   on(event: "request", handle: (request: PuppeteerRequest) => void): unknown;
   setContent(html: string, options: { waitUntil: "load"; timeout: number }): Promise<void>;
   evaluate(expression: string): Promise<unknown>;

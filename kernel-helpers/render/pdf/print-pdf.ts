@@ -64,12 +64,23 @@ export async function printPdf({
 // `document.querySelectorAll` itself can be hidden by an element of that name in the page.
 const spans = `Array.from(Document.prototype.querySelectorAll.call(document, "[data-page-of]"))`;
 
+const equations = `Array.from(Document.prototype.querySelectorAll.call(document, "div.math"))`;
+// All heights are read before any is set, so that the page is laid out once.
+const emptied = `((all) => {
+  const heights = all.map((e) => e.getBoundingClientRect().height + "px");
+  all.forEach((e, i) => Object.assign(e.style, { height: heights[i], contentVisibility: "hidden" }));
+})(${equations})`;
+const refilled = `${equations}.forEach((e) => Object.assign(e.style, { height: "", contentVisibility: "" }))`;
+
 async function printSettled(page: LockedPage): Promise<{ raw: Uint8Array; passes: number }> {
   const wanted = await page.evaluate(`${spans}.map((e) => String(e.getAttribute("data-page-of")))`);
   if (!isListOfText(wanted) || wanted.length === 0)
     return { raw: await page.pdf({ isTagged: true }), passes: 1 };
-  // Tags take as long as the rest and do not move anything, so the first pass goes without.
+  // The first pass only finds the pages: it goes without tags, which take as long as the rest, and
+  // with each equation as an empty box of its own height. The next pass checks what it found.
+  await page.evaluate(emptied);
   let numbers = await pagesOf(wanted, await page.pdf({ isTagged: false }));
+  await page.evaluate(refilled);
   for (let passes = 2; passes <= maxPasses; passes++) {
     await page.evaluate(
       `((numbers) => ${spans}.forEach((e, i) => { e.textContent = numbers[i]; }))(${JSON.stringify(numbers)})`,
