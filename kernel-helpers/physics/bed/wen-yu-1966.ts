@@ -60,6 +60,27 @@ export const wenYu = method({
         },
       ],
     },
+    {
+      from: { cite: "derivation", where: "inertial limit √(0.0408 g d (ρs−ρ)/ρ)" },
+      basis: "exact limit or identity",
+      rows: [
+        {
+          given: {
+            d: m(1),
+            eps: 0.42,
+            rho: kgpm3(1000),
+            rhoS: kgpm3(2000),
+            mu: cP(1),
+            D: m(100),
+            theta: rad(0),
+          },
+          in: mps,
+          printed: "0.632543",
+          within: 1e-4,
+          because: "33.7 is small beside the root at an Archimedes number of 1e13",
+        },
+      ],
+    },
   ],
 });
 
