@@ -3,7 +3,7 @@ import type { Quantity } from "../units/index.js";
 
 /**
  * One liquid: density [kg/m3] and dynamic viscosity [Pa s], the same everywhere unless a profile along
- * the hole is given, which then rules at the depths it covers.
+ * the hole is given, which then rules: it must cover every depth where the liquid is asked for.
  */
 export const Liquid = entity({
   id: "liquid",

@@ -5,6 +5,7 @@ import {
   diFelice,
   meanVelocity,
   pipeReynolds,
+  rodLeanLimit,
   sphereLaws,
   terminalVelocitySphere,
   type SphereLaw,
@@ -12,7 +13,7 @@ import {
 import { Well } from "../well/index.js";
 import { descentResults } from "./descent/descent-results.js";
 import { fallTime } from "./descent/fall-time.js";
-import { axisFactor, type LocalFlow } from "./descent/local-flow.js";
+import { axisFactor, densityAlong, type LocalFlow } from "./descent/local-flow.js";
 import { rodMethods, rodSlip } from "./descent/rod-slip.js";
 import type { Slip } from "./descent/slip.js";
 import { sphereSlip } from "./descent/sphere-slip.js";
@@ -28,17 +29,20 @@ interface Node extends LocalFlow, Slip {}
  * U = q/A [m/s] at the rate in place q [m3/s]; net velocity = slip − U, downward positive. Two sides
  * are told: favourable (guided along the axis, in the mean flow) and unfavourable (leaning as far as
  * the bore lets it, or broadside if it can turn; in the faster flow on the axis, 1.2 times the mean in
- * turbulent and 2 in laminar flow). Refuses a body wider than the bore where it is released.
+ * turbulent and 2 in laminar flow). In a section at θ from the vertical the weight along the hole drives
+ * the body, (ρ_s−ρ) g cos θ. Refuses a body wider than the bore where it is released, or lighter than
+ * the liquid.
  */
 export const descent = model({
   id: "descent",
   revision: 1,
   title: "Descent of one body against the flow",
   about: [
-    "At each depth the body falls at its terminal slip in the bore there; the start from rest and the change at a joint take less than a few body lengths of the bore and are left out.",
-    "Favourable side: the body keeps to the axis and meets the mean flow. Unfavourable side: it meets the flow on the axis (1.2 times the mean in turbulent flow, twice in laminar flow); a rod leans as far as the bore lets it, or lies across the flow if it is short enough to turn.",
-    "The verdict is passes or stops only where both sides agree; otherwise it is undecided, and the shape, the guiding or a test must decide.",
-    "One body alone, one liquid, steady flow. In a hole that leans the body rides the low side, in slower flow and with friction: above 10° the result is a guide only.",
+    "At each depth the body falls at its terminal slip in the bore there. The start from rest and the change at a joint are left out: they take a metre or two for a ball and up to a hundred for a long nosed bar.",
+    "Favourable side: the body meets the mean flow, a long rod upright on the axis. Unfavourable side: it meets the flow on the axis (1.2 times the mean in turbulent flow, twice in laminar flow); a rod leans as far as the bore lets it, or lies across the flow if it is short enough to turn.",
+    "The verdict is passes or stops only where both sides agree; otherwise it is undecided, and the shape, the guiding or a test must decide. Neither side carries the error of the drag law and the wall factor: a least net velocity within a tenth of the slip (a sixth for a rod) is near enough to go either way.",
+    "The whole rate is taken to flow at every depth of the well, also below its inflow: there a body falls more easily than is told.",
+    "One body alone, one liquid, steady flow. In a hole that leans only the weight along the hole drives the body; that it rides the low side, in slower flow and with friction, is left out: above 10° the result is a guide only.",
   ],
   uses: [meanVelocity, pipeReynolds, terminalVelocitySphere, diFelice, ...rodMethods],
   tolerances: {},
@@ -67,6 +71,7 @@ export const descent = model({
       });
     const uniform = liquid.densityAlong === null && liquid.viscosityAlong === null;
     const nodes: Node[] = [];
+    let couldTurn = false;
     const passages: {
       name: string;
       top: number;
@@ -92,6 +97,14 @@ export const descent = model({
         });
         break;
       }
+      if (shape.shape === "rod") {
+        const lean = rodLeanLimit.si({ d: shape.diameter, L: shape.length, D: s.bore });
+        if (couldTurn && lean < Math.PI / 2)
+          look.advise(
+            `the rod can turn over above "${s.name}" but not in it: it may arrive across the hole and lodge on its top`,
+          );
+        couldTurn = lean === Math.PI / 2;
+      }
       if (s.inclination > Math.PI / 18)
         look.advise(
           `"${s.name}" leans more than 10°: a body there rides the low side, and this result is a guide only`,
@@ -99,14 +112,18 @@ export const descent = model({
       const n = uniform ? 1 : Math.max(1, Math.ceil((s.base - top) / step));
       const here = Array.from({ length: n + 1 }, (_, i): Node => {
         const flow = localFlow(s, top + ((s.base - top) * i) / n);
+        if (material.density < flow.rho)
+          throw new InputError({
+            code: "out-of-bounds",
+            where: "descent.body.material.density",
+            problem: `is ${material.density} kg/m3, and the liquid at ${flow.depth} m has ${flow.rho} kg/m3: the body rises`,
+            expected: "a body of at least the liquid's density",
+          });
+        const rhoS = densityAlong(material.density, flow);
         const slip =
           shape.shape === "sphere"
-            ? sphereSlip({ d: shape.diameter, rhoS: material.density, law }, flow, look)
-            : rodSlip(
-                { d: shape.diameter, L: shape.length, nose: shape.nose, rhoS: material.density },
-                flow,
-                look,
-              );
+            ? sphereSlip({ d: shape.diameter, rhoS, law }, flow, look)
+            : rodSlip({ d: shape.diameter, L: shape.length, nose: shape.nose, rhoS }, flow, look);
         return { ...flow, ...slip };
       });
       const least = Math.min(...here.map((k) => k.favourable - k.U));
@@ -130,6 +147,13 @@ export const descent = model({
       const Re = look(pipeReynolds, { v: U, D: s.bore, rho, mu }, depth);
       return { depth, D: s.bore, rho, mu, U, axis: axisFactor(Re), theta: s.inclination };
     }
+    const [first] = nodes;
+    if (first && first.unfavourable <= first.U)
+      look.advise(
+        first.favourable <= first.U
+          ? "where it is released the flow is at least as fast as the body falls: it does not stand still there but is carried up"
+          : "where it is released the flow is, on the unfavourable side, at least as fast as the body falls: it may be carried up",
+      );
     return told(nodes, passages);
   },
 });

@@ -16,7 +16,8 @@ const DEPTH_TOLERANCE = 1e-9;
  * weight holds it there.
  *
  * Finds the top where Σ G(sq_0/A)L = Δp_0 − Δp_rest(sq_0) for the share s; the rest as in the resting
- * pack. A typed stop "not enough hole" when a pack up to the top of the well takes less than that.
+ * pack. A typed stop "not enough hole" when a pack up to the top of the well takes less than that, and
+ * "less than a grain" when one grain's height already takes more.
  */
 export const packToCut = model({
   id: "pack-to-cut",
@@ -24,7 +25,7 @@ export const packToCut = model({
   title: "The pack that cuts the flow to a share",
   about: [
     "Finds the height of a resting pack at which the flow through it is the wanted share of the clear flow; everything else as for a pack at rest.",
-    "If that pack would lift, the height is not a design: the flow through a lifted pack is told beside it.",
+    "If that pack would lift, the height is not a design: the flow that remains past a lifted pack is told beside it. A taller pack of the same grains leaves less flow, and may rest.",
   ],
   uses: [...Object.values(packLaws), packWeightGradient, dixonSpheres],
   tolerances: { rate: RATE_TOLERANCE, depth: DEPTH_TOLERANCE },
@@ -58,7 +59,13 @@ export const packToCut = model({
         stop: "not-enough-hole",
         because: `a pack from ${base} m to the top of the well at ${well.top} m leaves more than the wanted share of the flow`,
       };
-    const top = findRoot(surplus, well.top, base - 1e-6, { relative: DEPTH_TOLERANCE });
+    const grain = base - grade.diameter;
+    if (surplus(grain) > 0)
+      return {
+        stop: "less-than-a-grain",
+        because: `one layer of ${grade.diameter} m grains already leaves less than the wanted share of the flow`,
+      };
+    const top = findRoot(surplus, well.top, grain, { relative: DEPTH_TOLERANCE });
     return packOutcome(
       { law, drive, clearRate, rest },
       packColumn(place, top),

@@ -12,6 +12,7 @@ import {
 } from "../../kernel-helpers/physics/index.js";
 import {
   cP,
+  deg,
   deltaMPa,
   deltaPa,
   fraction,
@@ -22,7 +23,8 @@ import {
   mps,
   rad,
 } from "../../kernel-helpers/units/index.js";
-import { bore, grade, liquid, pipe, tapered, water } from "./scene.js";
+import { BoreSection, Well } from "../../kernel-helpers/well/index.js";
+import { bore, grade, liquid, pipe, tapered, washed, water } from "./scene.js";
 
 type Inputs = Parameters<typeof restingPack>[0];
 const base: Inputs = {
@@ -132,7 +134,8 @@ describe("a resting pack, limits and properties", () => {
         (H, d) => {
           const r = run({ top: mMD(1900 - H), grade: grade(d) });
           if (r.state === "rests") expect(r.drop).toBeLessThanOrEqual(r.weight * (1 + 1e-9));
-          expect(r.rate).toBe(r.state === "rests" ? r.restingRate : r.liftedRate);
+          if (r.state === "rests") expect(r.rate).toBe(r.restingRate);
+          else expect(r.rate / r.liftedRate).toBeCloseTo(1, 8);
         },
       ),
       { seed: 6, numRuns: 60 },
@@ -143,6 +146,96 @@ describe("a resting pack, limits and properties", () => {
     const parts = Object.fromEntries(r.parts.map((p) => [p.name, p]));
     expect(parts["casing"]?.gradient).toBeLessThan(parts["liner"]?.gradient ?? 0);
     expect(r.weakest).toBe(1500);
+  });
+  it("in an even bore is as near to lifting at every depth, and tells its base", () => {
+    expect(run().weakest).toBe(1900);
+    expect(run({ rest: "quadratic" }).weakest).toBe(1900);
+  });
+  it("in a narrow bore above a wide one lifts only there, and the part below keeps its drag", () => {
+    const over = { well: washed, base: mMD(1400), top: mMD(800) };
+    const r = run(over);
+    expect([r.state, r.weakest]).toEqual(["lifts", 1000]);
+    const below = dixonSpheres({ d: m(0.0254), D: m(0.3) });
+    const above = dixonSpheres({ d: m(0.0254), D: bore });
+    const G = kta({
+      u: mps(r.rate / ((Math.PI / 4) * 0.3 ** 2)),
+      d: m(0.0254),
+      eps: below,
+      rho: kgpm3(700),
+      mu: cP(0.9),
+      D: m(0.3),
+    });
+    const carried = (1 - above) * 7150 * 9.80665 * 200;
+    expect((carried + G * 400 + 19e6 * (r.rate / 0.057)) / 19e6).toBeCloseTo(1, 8);
+    expect(r.rate).toBeGreaterThan(r.restingRate);
+    expect(r.rate).toBeGreaterThan(r.liftedRate);
+    const { findings } = restingPack.explain({ ...base, ...over });
+    expect(findings.some((f) => f.says.includes("only the part above 1000 m lifts"))).toBe(true);
+  });
+  it("leaves no less flow lifted than at rest, whatever the bores: the weight bears no more than the drag", () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 0, max: 990, noNaN: true }),
+        fc.double({ min: 1010, max: 1500, noNaN: true }),
+        fc.double({ min: 0.004, max: 0.04, noNaN: true }),
+        fc.constantFrom(washed, tapered),
+        (top, low, d, well) => {
+          const r = run({ well, top: mMD(top), base: mMD(low), grade: grade(d) });
+          expect(r.rate).toBeGreaterThanOrEqual(r.restingRate * (1 - 1e-9));
+        },
+      ),
+      { seed: 8, numRuns: 60 },
+    );
+  });
+  it("heavier than the drive lies still by any law, however fine its grains", () => {
+    const r = run({ top: mMD(1400), grade: grade(0.003), law: "ergun-1952" });
+    expect(r.weight).toBeGreaterThan(19e6);
+    expect(r.state).toBe("rests");
+    expect(r.margin).toBeGreaterThan(1 - 19e6 / r.weight);
+  });
+  it("may lift with a turbulent path where it rests with a linear one: the pack meets more of the drive", () => {
+    const at = (rest: Inputs["rest"]) => run({ top: mMD(1485), rest });
+    expect([at("linear").state, at("quadratic").state]).toEqual(["rests", "lifts"]);
+    expect(at("quadratic").margin).toBeLessThan(at("linear").margin);
+  });
+  it("tells each section apart even under one name, with the mean of its gradients", () => {
+    const section = (top: number, low: number, lean: number) =>
+      BoreSection({
+        name: "liner",
+        wall: "liner",
+        top: mMD(top),
+        base: mMD(low),
+        bore,
+        inclination: deg(lean),
+      });
+    const graded = Liquid({
+      name: "graded",
+      density: kgpm3(700),
+      viscosity: cP(0.9),
+      densityAlong: { depth: [mMD(0), mMD(2000)], value: [kgpm3(500), kgpm3(900)] },
+    });
+    const r = run({
+      well: Well({ sections: [section(0, 1700, 0), section(1700, 2000, 9)] }),
+      liquid: graded,
+    });
+    expect(r.parts.map((p) => [p.name, p.top, p.base])).toEqual([
+      ["liner", 1500, 1700],
+      ["liner", 1700, 1900],
+    ]);
+    expect((r.parts[0]?.gradient ?? NaN) * 200 + (r.parts[1]?.gradient ?? NaN) * 200).toBeCloseTo(
+      r.drop,
+      3,
+    );
+    expect((r.parts[0]?.weight ?? NaN) * 200 + (r.parts[1]?.weight ?? NaN) * 200).toBeCloseTo(
+      r.weight,
+      3,
+    );
+  });
+  it("that one layer of grains would do ends in a stop that says so", () => {
+    const { top: _, ...rest } = base;
+    expect(packToCut({ ...rest, share: fraction(1 - 1e-9) })).toMatchObject({
+      stop: "less-than-a-grain",
+    });
   });
   it("that is sized to a share leaves that share", () => {
     for (const share of [0.5, 0.2, 0.12]) {
@@ -183,6 +276,16 @@ describe("a resting pack refuses", () => {
       "grains wider than the bore",
       { grade: grade(0.2) },
       { code: "out-of-bounds", where: "grade.diameter" },
+    ],
+    [
+      "grains lighter than the liquid",
+      { liquid: Liquid({ name: "mercury", density: kgpm3(13_500), viscosity: cP(1.5) }) },
+      { code: "out-of-bounds", where: "grade.material.density" },
+    ],
+    [
+      "grains that neither sink nor rise",
+      { liquid: Liquid({ name: "as heavy", density: kgpm3(7850), viscosity: cP(1) }) },
+      { code: "out-of-bounds", where: "grade.material.density" },
     ],
     [
       "a drive of nothing",

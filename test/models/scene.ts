@@ -48,6 +48,27 @@ export const tapered = Well({
     }),
   ],
 });
+/** A narrow bore above a wide one: a liner above a hole that has washed out. */
+export const washed = Well({
+  sections: [
+    BoreSection({
+      name: "liner",
+      wall: "liner",
+      top: mMD(0),
+      base: mMD(1000),
+      bore,
+      inclination: deg(0),
+    }),
+    BoreSection({
+      name: "washed hole",
+      wall: "open hole",
+      top: mMD(1000),
+      base: mMD(1500),
+      bore: m(0.3),
+      inclination: deg(0),
+    }),
+  ],
+});
 export const ball = (d: number) =>
   FallingBody({ material: carbonSteel, shape: Sphere({ diameter: m(d) }) });
 export const rod = (d: number, L: number, nose: "flat" | "rounded" = "flat") =>

@@ -24,7 +24,7 @@ export const descentResults = {
   slip: {
     kind: profile("velocity"),
     symbol: "v_s",
-    note: "slip, favourable: axial, in the mean flow",
+    note: "slip, favourable: in the mean flow, a long rod upright",
   },
   slipLow: {
     kind: profile("velocity"),
@@ -41,11 +41,11 @@ export const descentResults = {
   leastAt: { kind: "measuredDepth", note: "depth of the least net velocity, unfavourable" },
   standsAt: {
     kind: optional("measuredDepth"),
-    note: "depth where it stands still, favourable",
+    note: "depth that it does not get below, favourable",
   },
   standsAtLow: {
     kind: optional("measuredDepth"),
-    note: "depth where it stands still, unfavourable",
+    note: "depth that it does not get below, unfavourable",
   },
   time: { kind: optional("time"), note: "time from release to the base, favourable" },
   timeLow: { kind: optional("time"), note: "time from release to the base, unfavourable" },

@@ -14,6 +14,13 @@ export interface LocalFlow {
 }
 
 /**
+ * The density of a solid [kg/m3] whose buoyant weight is what a body of density ρ_s has along a hole at θ
+ * from the vertical: ρ + (ρ_s−ρ) cos θ. Weight enters the laws of falling by ρ_s−ρ alone.
+ */
+export const densityAlong = (rhoS: number, { rho, theta }: LocalFlow): number =>
+  theta === 0 ? rhoS : rho + (rhoS - rho) * Math.cos(theta);
+
+/**
  * Velocity on the axis of a pipe over the mean: 2 in laminar flow (exact, Poiseuille), about 1.2 in
  * turbulent flow (common practice, no source). Between Re 2300 and 4000 the velocity on the axis itself
  * goes on a straight line, so that it never falls as the flow rises.

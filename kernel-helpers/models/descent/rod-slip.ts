@@ -33,7 +33,9 @@ export function rodSlip(body: RodBody, at: LocalFlow, look: Look): Slip {
 /**
  * Favourable: upright on the axis, the slower of the exact laminar solution (no end losses) and the
  * balance with end losses, of which each leaves out what the other has. Unfavourable: at the largest
- * lean, with its whole projected side against the flow on the axis.
+ * lean, with its whole projected side against the flow on the axis. That is more than cross-flow drag and
+ * friction at the touching ends together: sin t > sin³ t + f sin² t cos t for a friction f of up to 0.3
+ * and a lean below 73°.
  */
 function guided({ d, L, nose, rhoS }: RodBody, at: LocalFlow, lean: number, look: Look): Slip {
   const { D, rho, mu, U, axis, depth } = at;

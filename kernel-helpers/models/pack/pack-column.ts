@@ -10,6 +10,8 @@ const PIECE = 25;
 /** A piece of a pack: one bore, one voidage, even fluid properties. SI. */
 export interface Piece {
   readonly name: string;
+  /** Place of its bore section in the well. */
+  readonly section: number;
   readonly top: number;
   readonly base: number;
   readonly area: number;
@@ -23,6 +25,8 @@ export interface PackColumn {
   readonly pieces: readonly Piece[];
   readonly d: number;
   readonly rhoS: number;
+  /** Whether the voidage is the analyst's and not Dixon's. */
+  readonly isVoidageStated: boolean;
 }
 export interface PackPlace {
   readonly well: Value<typeof Well>;
@@ -36,7 +40,8 @@ export interface PackPlace {
 export function packColumn(place: PackPlace, top: number): PackColumn {
   const { well, liquid, grade, base } = place;
   const d = grade.diameter;
-  const pieces = well.sections.flatMap((s): Piece[] => {
+  const rhoS = grade.material.density;
+  const pieces = well.sections.flatMap((s, section): Piece[] => {
     const from = Math.max(s.top, top);
     const to = Math.min(s.base, base);
     if (to <= from) return [];
@@ -52,20 +57,29 @@ export function packColumn(place: PackPlace, top: number): PackColumn {
     return Array.from({ length: n }, (_, i): Piece => {
       const a = from + ((to - from) * i) / n;
       const b = from + ((to - from) * (i + 1)) / n;
+      const rho = liquid.densityAt((a + b) / 2);
+      if (rhoS <= rho)
+        throw new InputError({
+          code: "out-of-bounds",
+          where: "grade.material.density",
+          problem: `is ${rhoS} kg/m3, and the liquid in "${s.name}" has ${rho} kg/m3: the grains do not sink`,
+          expected: "grains denser than the liquid they lie in",
+        });
       return {
         name: s.name,
+        section,
         top: a,
         base: b,
         area: s.area,
         bore: s.bore,
         theta: s.inclination,
         eps,
-        rho: liquid.densityAt((a + b) / 2),
+        rho,
         mu: liquid.viscosityAt((a + b) / 2),
       };
     });
   });
-  return { pieces, d, rhoS: grade.material.density };
+  return { pieces, d, rhoS, isVoidageStated: place.voidage !== null };
 }
 
 /** Dynamic pressure gradient in a piece at a flow rate [Pa/m]. */
@@ -87,26 +101,74 @@ export const packWeight = ({ pieces, rhoS }: PackColumn): number =>
 export const packMass = ({ pieces, rhoS }: PackColumn): number =>
   pieces.reduce((sum, p) => sum + p.area * (p.base - p.top) * (1 - p.eps) * rhoS, 0);
 
+interface GrainStress {
+  readonly depth: number;
+  /** Σ(w−G)L from the free top down to this depth [Pa]. */
+  readonly stress: number;
+  /** ΣwL above this depth [Pa]. */
+  readonly weight: number;
+}
+
+/**
+ * Grain stress at the base of each piece at a rate. Within a piece it goes on a straight line, so its
+ * least value is at an end. It carries over a change of bore: a shoulder takes no share of it.
+ */
+function grainStress(law: PackLaw, { pieces, d, rhoS }: PackColumn, q: number): GrainStress[] {
+  let stress = 0;
+  let weight = 0;
+  return pieces.map((p) => {
+    const w = pieceWeight(p, rhoS);
+    const length = p.base - p.top;
+    stress += (w - pieceGradient(law, p, d, q)) * length;
+    weight += w * length;
+    return { depth: p.base, stress, weight };
+  });
+}
+
+/** Margins this close are one: a pack in an even bore is as near to lifting at every depth. */
+const SAME_MARGIN = 1e-12;
+
 /**
  * How far the pack is from lifting at a rate: the least, over all depths, of the grain stress
  * Σ(w−G)L from the free top down, as a share of the weight above. Wall friction gets no credit:
- * without a cap a cohesionless pack unravels from its top. Negative where it lifts.
+ * without a cap a cohesionless pack unravels from its top. Negative where it lifts. Of equal margins
+ * the deepest is told.
  */
-export function holdMargin(
+export const holdMargin = (
   law: PackLaw,
   column: PackColumn,
   q: number,
-): { margin: number; depth: number } {
-  let stress = 0;
-  let weight = 0;
-  let least = { margin: Infinity, depth: column.pieces[0]?.top ?? 0 };
-  for (const p of column.pieces) {
-    const w = pieceWeight(p, column.rhoS);
-    const length = p.base - p.top;
-    stress += (w - pieceGradient(law, p, column.d, q)) * length;
-    weight += w * length;
-    const margin = weight > 0 ? stress / weight : -Infinity;
-    if (margin < least.margin) least = { margin, depth: p.base };
-  }
-  return least;
+): { margin: number; depth: number } =>
+  grainStress(law, column, q).reduce(
+    (least, { depth, stress, weight }) => {
+      const margin = stress / weight;
+      return margin <= least.margin + SAME_MARGIN
+        ? { margin: Math.min(margin, least.margin), depth }
+        : least;
+    },
+    { margin: Infinity, depth: column.pieces[0]?.top ?? 0 },
+  );
+
+/** What a flow makes of a pack: what it takes from the flow, and down to where it is lifted. */
+export interface PackLoad {
+  /** Pressure taken from the flow [Pa]. */
+  readonly taken: number;
+  /** Base of the lifted part [m]; null while all of it rests. */
+  readonly liftedTo: number | null;
+}
+
+/**
+ * A pack at a rate, each grain in the bore where it lay. All above the depth of the least grain stress,
+ * where that is below nothing, is lifted and loads the flow with its whole weight; what lies below rests
+ * and takes the drag: ΣwL + ΣGL = Σ GL (all) + the least stress. It never falls as the rate rises.
+ */
+export function packLoad(law: PackLaw, column: PackColumn, q: number): PackLoad {
+  const drop = packDrop(law, column, q);
+  const least = grainStress(law, column, q).reduce<GrainStress | null>(
+    (low, s) => (s.stress < (low?.stress ?? 0) ? s : low),
+    null,
+  );
+  return least
+    ? { taken: drop + least.stress, liftedTo: least.depth }
+    : { taken: drop, liftedTo: null };
 }

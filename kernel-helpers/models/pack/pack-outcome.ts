@@ -4,6 +4,7 @@ import { dixonSpheres, packLaws, packWeightGradient, type PackLaw } from "../../
 import {
   holdMargin,
   packDrop,
+  packLoad,
   packMass,
   packWeight,
   pieceGradient,
@@ -25,14 +26,11 @@ export interface Driven {
 
 export const RATE_TOLERANCE = 1e-10;
 
-/** Flow through a resting pack: its loss and that of the rest of the path share the drive. */
-export const restingRate = ({ law, drive, clearRate, rest }: Driven, column: PackColumn): number =>
-  findRoot(
-    (q) => packDrop(law, column, q) + restLoss(rest, drive, q / clearRate) - drive,
-    0,
-    clearRate,
-    { relative: RATE_TOLERANCE },
-  );
+/** The flow at which what the pack takes and the loss of the rest of the path share the drive. */
+const sharedRate = ({ drive, clearRate, rest }: Driven, taken: (q: number) => number): number =>
+  findRoot((q) => taken(q) + restLoss(rest, drive, q / clearRate) - drive, 0, clearRate, {
+    relative: RATE_TOLERANCE,
+  });
 
 /** Everything told of a pack in place, with its range findings. */
 export function packOutcome(
@@ -42,12 +40,13 @@ export function packOutcome(
   look: Look,
 ): Results {
   const { law, drive, clearRate, rest } = driven;
-  const { pieces, d, rhoS } = column;
-  const resting = restingRate(driven, column);
+  const { pieces, d, rhoS, isVoidageStated } = column;
+  const resting = sharedRate(driven, (q) => packDrop(law, column, q));
   const lifted = clearRate * shareAt(rest, drive, drive - packWeight(column));
   const { margin, depth: weakest } = holdMargin(law, column, resting);
   const state = margin >= 0 ? "rests" : "lifts";
-  const rate = state === "rests" ? resting : lifted;
+  const rate =
+    state === "rests" ? resting : sharedRate(driven, (q) => packLoad(law, column, q).taken);
   for (const p of pieces) {
     look(
       packLaws[law],
@@ -55,13 +54,18 @@ export function packOutcome(
       p.base,
     );
     look(packWeightGradient, { eps: p.eps, rho: p.rho, rhoS, theta: p.theta }, p.base);
-    look(dixonSpheres, { d, D: p.bore }, p.base);
+    if (!isVoidageStated) look(dixonSpheres, { d, D: p.bore }, p.base);
   }
   const gradients = pieces.map((p) => pieceGradient(law, p, d, resting));
   const weights = pieces.map((p) => pieceWeight(p, rhoS));
   if (state === "rests" && gradients.some((g, i) => g > (weights[i] ?? 0)))
     look.advise(
       "a part of the pack is held down only by what lies on it: its own weight is less than the flow's gradient there",
+    );
+  const liftedTo = state === "lifts" ? packLoad(law, column, rate).liftedTo : null;
+  if (liftedTo !== null && liftedTo < (pieces.at(-1)?.base ?? 0))
+    look.advise(
+      `only the part above ${Number(liftedTo.toFixed(1))} m lifts at the flow that remains; what lies below it stays`,
     );
   const top = pieces[0]?.top ?? 0;
   const base = pieces.at(-1)?.base ?? 0;
@@ -95,31 +99,36 @@ function liftRate(law: PackLaw, column: PackColumn, scale: number): number {
   return findRoot(held, 0, high, { relative: RATE_TOLERANCE });
 }
 
+/** The pieces of each bore section as one part, its gradients the means over its length. */
 function parts(
-  column: PackColumn,
+  { pieces }: PackColumn,
   gradients: readonly number[],
   weights: readonly number[],
   q: number,
 ): Results["parts"] {
-  const out: { -readonly [N in keyof Results["parts"][number]]: Results["parts"][number][N] }[] =
-    [];
-  column.pieces.forEach((p, i) => {
-    const last = out.at(-1);
-    if (last?.name === p.name && last.base === p.top) {
-      last.base = p.base;
-      return;
-    }
-    out.push({
-      name: p.name,
-      top: p.top,
-      base: p.base,
-      voidage: p.eps,
-      velocity: q / p.area,
-      gradient: gradients[i] ?? 0,
-      weight: weights[i] ?? 0,
-    });
+  return [...new Set(pieces.map((p) => p.section))].flatMap((section) => {
+    const own = pieces.flatMap((p, i) =>
+      p.section === section ? [{ p, G: gradients[i] ?? 0, w: weights[i] ?? 0 }] : [],
+    );
+    const [first] = own;
+    const last = own.at(-1);
+    if (!first || !last) return [];
+    const { name, top, eps, area } = first.p;
+    const base = last.p.base;
+    const mean = (of: (piece: (typeof own)[number]) => number): number =>
+      own.reduce((sum, k) => sum + of(k) * (k.p.base - k.p.top), 0) / (base - top);
+    return [
+      {
+        name,
+        top,
+        base,
+        voidage: eps,
+        velocity: q / area,
+        gradient: mean((k) => k.G),
+        weight: mean((k) => k.w),
+      },
+    ];
   });
-  return out;
 }
 
 /** A value per piece as a profile with steps at the joints. */

@@ -11,8 +11,8 @@ export const PackPart = entity({
     base: { kind: "measuredDepth", note: "base" },
     voidage: { kind: "dimensionless", note: "voidage" },
     velocity: { kind: "velocity", note: "superficial velocity" },
-    gradient: { kind: "pressureGradient", note: "flow gradient" },
-    weight: { kind: "pressureGradient", note: "weight gradient" },
+    gradient: { kind: "pressureGradient", note: "mean flow gradient" },
+    weight: { kind: "pressureGradient", note: "mean weight gradient" },
   },
   build: (f) => f,
 });
@@ -23,13 +23,13 @@ export const packResults = {
   rate: {
     kind: "flowRate",
     symbol: "q",
-    note: "flow that remains: through the resting pack, or past the lifted one",
+    note: "flow that remains: through the resting pack, or past the part of it that is lifted",
   },
   share: { kind: "dimensionless", symbol: "q/q_0", note: "flow that remains over the clear flow" },
   restingRate: { kind: "flowRate", note: "flow if the pack rests" },
   liftedRate: {
     kind: "flowRate",
-    note: "flow if the grains are carried by it, all of them still in the well",
+    note: "flow if all the grains are carried by it, each in the bore where it lay",
   },
   drop: {
     kind: "pressureDifference",
