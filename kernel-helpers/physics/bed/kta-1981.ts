@@ -35,7 +35,7 @@ export const kta = method({
     ((160 + 3 * packReynolds(a) ** 0.9) * a.mu * a.u * (1 - a.eps) ** 2) / (a.eps ** 3 * a.d ** 2),
   direction: {
     safeFor:
-      "the flow that a pack lets through, for rough or angular grains: never less than it says",
+      "the flow that a pack lets through, for rough or angular grains: never more than it says",
     unsafeFor: "holding a pack of rough or angular grains down: their gradient is higher",
   },
   checks: [

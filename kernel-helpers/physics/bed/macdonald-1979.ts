@@ -36,7 +36,7 @@ export const macdonald = method({
     (1.8 * (1 - eps) * rho * u * Math.abs(u)) / (eps ** 3 * d),
   direction: {
     safeFor:
-      "the flow that a pack lets through, for rough or angular grains: never less than it says",
+      "the flow that a pack lets through, for rough or angular grains: never more than it says",
     unsafeFor: "holding a pack of rough or angular grains down: their gradient is higher",
   },
   checks: [
