@@ -1,20 +1,23 @@
-import { isStated, type CheckItem, type Stated } from "../study/index.js";
+import type { CheckItem, Stated } from "../study/index.js";
 import { isKind } from "../units/index.js";
-import type { Context } from "./context.js";
+import { split, type Context } from "./context.js";
 import { joined, showNumber } from "./show.js";
 import { formatNumber } from "../units/index.js";
+import { sentenceCase } from "./sentence-case.js";
 import type { CheckView, Link } from "./view.js";
 
 export function checkView(ctx: Context, item: CheckItem): CheckView {
   const value = item.args["value"] ?? { absent: true as const };
   const limit = item.args["limit"] ?? { absent: true as const };
+  const shown = ctx.showNode(value, item.of);
   const y = ctx.resolver.resolve(limit, item.of);
   return {
     kind: "check",
     number: ctx.numbering.of(item.id),
     anchor: ctx.numbering.anchor(item.id),
-    title: item.title,
-    value: joined(ctx.showNode(value, item.of)),
+    title: sentenceCase(item.title),
+    value: joined(shown),
+    shown: { ...split(shown), padding: "" },
     sense: item.sense,
     limit: joined(ctx.showNode(limit, item.of)),
     valueFrom: ctx.from(value),
@@ -23,7 +26,7 @@ export function checkView(ctx: Context, item: CheckItem): CheckView {
       "stop" in item.result ? "not evaluated" : item.result.value === "pass" ? "passes" : "fails",
     margin: margin(ctx, item, "stop" in y ? null : y.value),
     because: item.because,
-    assumptions: assumptionsUnder(ctx, item.id),
+    assumptions: grounds(ctx, item.id, "assumed").map((g) => ctx.numbering.link(g.id)),
   };
 }
 
@@ -49,10 +52,15 @@ function margin(ctx: Context, item: CheckItem, limit: unknown): string {
   return shown + share;
 }
 
-export const assumptionsUnder = (ctx: Context, id: string): Link[] => grounds(ctx, id, "assumed");
-export const inputsUnder = (ctx: Context, id: string): Link[] => grounds(ctx, id, "given");
-const grounds = (ctx: Context, id: string, op: Stated["op"]): Link[] =>
+/** The assumptions under an item that approval has to wait for. */
+export const unverifiedUnder = (ctx: Context, id: string): Link[] =>
   ctx.lineage
     .groundsOf(id)
-    .filter((g) => isStated(g) && g.op === op)
-    .map((g) => ctx.numbering.titled(g.id));
+    .filter((g) => g.verify?.required === true)
+    .map((g) => ctx.numbering.link(g.id));
+export const assumptionsUnder = (ctx: Context, id: string): Link[] =>
+  grounds(ctx, id, "assumed").map((g) => ctx.numbering.titled(g.id));
+export const inputsUnder = (ctx: Context, id: string): Link[] =>
+  grounds(ctx, id, "given").map((g) => ctx.numbering.link(g.id));
+const grounds = (ctx: Context, id: string, op: Stated["op"]): Stated[] =>
+  ctx.lineage.groundsOf(id).filter((g) => g.op === op);

@@ -1,6 +1,8 @@
 import type { Comparison } from "../study/index.js";
 import { formatNumber } from "../units/index.js";
+import { aligned } from "./align.js";
 import { split, type Context } from "./context.js";
+import { sentenceCase } from "./sentence-case.js";
 import type { ComparisonView, Row } from "./view.js";
 
 /** A result calculated a second way. */
@@ -13,16 +15,19 @@ export function comparisonView(ctx: Context, item: Comparison): ComparisonView {
       meaning: title,
       ...split(ctx.showNode(node, item.of)),
       from: ctx.from(node),
+      padding: "",
     };
   };
   const { result } = item;
+  const [main, alternate] = aligned([side("main"), side("alternate")]);
+  if (!main || !alternate) throw new Error(`${item.id} has no two sides`);
   return {
     kind: "comparison",
     number: ctx.numbering.of(item.id),
     anchor: ctx.numbering.anchor(item.id),
-    title: item.title,
-    main: side("main"),
-    alternate: side("alternate"),
+    title: sentenceCase(item.title),
+    main,
+    alternate,
     difference:
       "stop" in result
         ? `not defined: ${result.because}`

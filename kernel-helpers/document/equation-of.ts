@@ -8,10 +8,14 @@ export function equationOf(symbol: string, tex: string): string {
     : String.raw`${relation}\qquad\text{solved for }${symbol}`;
 }
 
-/** The same with the numbers put in, and the result. */
+/**
+ * The same with the numbers put in, and the result. Where further relations follow the first ("…, λ = d/D")
+ * or the output stands on no side alone, the result is said apart: behind them it would read as theirs.
+ */
 export function putInOf(symbol: string, tex: string, result: string): string {
   const [, , relation] = SOLVED.exec(tex) ?? [];
-  return relation === undefined
-    ? `${symbol}=${tex}${result}`
-    : String.raw`${relation}\qquad ${symbol}${result}`;
+  if (relation !== undefined) return String.raw`${relation}\qquad ${symbol}${result}`;
+  return /\\q?quad|=|\\begin|\\text/.test(tex)
+    ? String.raw`${symbol}=${tex}\qquad ${symbol}${result}`
+    : `${symbol}=${tex}${result}`;
 }

@@ -1,7 +1,6 @@
 import type { Stated } from "../study/index.js";
 import { formatTyped, unitOf } from "../units/index.js";
-import type { Context } from "./context.js";
-import { textOf } from "./show.js";
+import { split, type Context } from "./context.js";
 import type { AssumptionView, InputView } from "./view.js";
 
 /** A stated value as it was typed, with its source and what uses it. */
@@ -16,6 +15,7 @@ export function inputView(ctx: Context, item: Stated): InputView {
     file: null,
     details: [],
     spread: null,
+    padding: "",
   };
   if (item.form === "number") {
     const { symbol } = unitOf(item.type, item.unit, item.id);
@@ -24,19 +24,22 @@ export function inputView(ctx: Context, item: Stated): InputView {
       ...base,
       value: formatTyped(item.typed),
       unit,
+      form: "number",
       spread:
         item.spread &&
         `${formatTyped(item.spread.low)} to ${formatTyped(item.spread.high)}${unit && ` ${unit}`} (${item.spread.says})`,
     };
   }
-  if (item.form === "choice") return { ...base, value: textOf(item.result.value), unit: "" };
-  const { text } = ctx.show({ type: item.type, value: item.result.value });
+  const value = split(ctx.show({ type: item.type, value: item.result.value }));
+  if (item.form === "choice") return { ...base, ...value };
   return {
     ...base,
-    value: text,
-    unit: "",
+    ...value,
     file: item.file && `${item.file.name}, SHA-256 ${item.file.sha256}`,
-    details: ctx.rows(item.args, ctx.resolver.fieldsOf(item.use)),
+    // What the name and the source say already is not said again.
+    details: ctx
+      .rows(item.args, ctx.resolver.fieldsOf(item.use))
+      .filter((r) => r.value !== value.value && r.value !== item.because),
   };
 }
 

@@ -1,29 +1,44 @@
 import type { DeclaredMethod, DeclaredModel } from "../study/index.js";
-import { displayUnit, formatNumber, inUnit, isKind, kinds, type Kind } from "../units/index.js";
+import { formatNumber, isKind, kinds, type Kind } from "../units/index.js";
 import { equationOf } from "./equation-of.js";
 import { words, type Context } from "./context.js";
+import { groupText, limitsText } from "./range-text.js";
+import { siUnit } from "./si-unit.js";
 import type { Link, MethodView, ModelView } from "./view.js";
 
-const range = (kind: Kind, [low, high]: readonly [number | null, number | null]): string => {
-  const unit = displayUnit(kind, "SI", high ?? low ?? 0);
-  const say = (x: number): string => formatNumber(inUnit(x as never, unit));
-  const end = unit.symbol === "1" ? "" : ` ${unit.symbol}`;
-  if (low === null && high === null) return "any";
-  if (high === null) return `${say(low ?? 0)}${end} and above`;
-  if (low === null || low === 0) return `up to ${say(high)}${end}`;
-  return `${say(low)} to ${say(high)}${end}`;
+const BASIS: { readonly [basis: string]: string } = {
+  "from memory": "quoted from memory, not confirmed in print",
+};
+const checkText = (
+  { from, basis, rows }: DeclaredMethod["checks"][number],
+  citations: ReadonlyMap<string, string>,
+): string => {
+  const cite = from.cite === "derivation" ? "" : `[${citations.get(from.cite) ?? "?"}] `;
+  return `${cite}${from.where}: ${BASIS[basis] ?? basis}, ${rows} value${rows === 1 ? "" : "s"}`;
 };
 
+/** The ranges of a method, those of one meaning together; of laws it chooses among, those in use. */
+function rangesOf(ctx: Context, m: DeclaredMethod): string[] {
+  const out = new Map<string, string[]>();
+  for (const r of m.ranges) {
+    const law = r.group.startsWith("Re of ") ? r.group.slice(6) : null;
+    if (law !== null && ctx.numbering.method(law) === null) continue;
+    const meaning = law === null || r.note === null ? groupText(r) : r.note;
+    const which = law === null ? "" : ` with ${ctx.numbering.methodNumber(law)}`;
+    const advised = r.stated ? "" : " (advised here, not stated by the source)";
+    out.set(meaning, [...(out.get(meaning) ?? []), limitsText(r) + which + advised]);
+  }
+  return [...out].map(([meaning, limits]) => `${meaning}: ${limits.join(", ")}`);
+}
+
 export function methodView(
+  ctx: Context,
   m: DeclaredMethod,
-  number: string,
   citations: ReadonlyMap<string, string>,
   usedIn: readonly Link[],
 ): MethodView {
-  const cite = (id: string): string =>
-    id === "derivation" ? "derivation" : `[${citations.get(id) ?? "?"}]`;
   return {
-    number,
+    number: ctx.numbering.methodNumber(m.id),
     anchor: `method-${m.id}`,
     id: m.id,
     revision: m.revision,
@@ -42,46 +57,33 @@ export function methodView(
       to: m.source.cite === "derivation" ? null : `ref-${m.source.cite}`,
       where: m.source.where,
     },
-    ranges: m.ranges.map(
-      (r) =>
-        `${r.group}: ${range(r.kind, r.range)}${r.stated ? "" : " (advised here, not stated by the source)"}${r.note && r.note !== r.group ? `: ${r.note}` : ""}`,
-    ),
-    checks: m.checks.map(
-      (c) =>
-        `${c.basis}: ${cite(c.from.cite)} ${c.from.where} (${c.rows} value${c.rows === 1 ? "" : "s"})`,
-    ),
+    ranges: rangesOf(ctx, m),
+    checks: m.checks.map((c) => checkText(c, citations)),
     direction:
       m.direction &&
       `Safe side for ${m.direction.safeFor}; unsafe side for ${m.direction.unsafeFor}.`,
     usedIn,
   };
 }
-const siOf = (kind: Kind): string => (kinds[kind].si === "1" ? "–" : kinds[kind].si);
+const siOf = (kind: Kind): string => (kinds[kind].si === "1" ? "–" : siUnit(kinds[kind].si));
 
 export function modelView(
   ctx: Context,
   m: DeclaredModel,
-  number: string,
   applied: ReadonlySet<string>,
-  methodNumber: (id: string) => string,
   usedIn: readonly Link[],
 ): ModelView {
   return {
-    number,
+    number: ctx.numbering.methodNumber(m.id),
     anchor: `method-${m.id}`,
     id: m.id,
     revision: m.revision,
     title: m.title,
     about: m.about,
-    methods: m.uses
-      .filter((u) => applied.has(u.id))
-      .map((u) => ({
-        text: `${methodNumber(u.id)} ${ctx.resolver.declaration(u.id).title}`,
-        to: `method-${u.id}`,
-      })),
+    methods: [...applied].sort().flatMap((id) => ctx.numbering.method(id) ?? []),
     tolerances: Object.entries(m.tolerances).map(([name, x]) => ({
       name: words(name),
-      value: formatNumber(x),
+      value: formatNumber(x, 1),
     })),
     usedIn,
   };

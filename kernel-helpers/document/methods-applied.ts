@@ -12,20 +12,23 @@ export function methodsApplied(
     (i): i is AppliedUse => i.op === "step" || i.op === "run",
   ),
 ): ReadonlySet<string> {
+  return new Set(items.flatMap((item) => [...methodsOf(body, item)]));
+}
+
+/** Methods that took part in one item. */
+export function methodsOf(body: Body, item: AppliedUse): ReadonlySet<string> {
   const methods = new Map(
     body.declared.flatMap((d) => (d.role === "method" ? [[d.id, d] as const] : [])),
   );
   const out = new Set<string>();
-  for (const item of items) {
-    const chosen = choicesOf(body, item);
-    const open = item.op === "step" ? [item.use] : [...item.looked];
-    for (let id = open.pop(); id !== undefined; id = open.pop()) {
-      const m = methods.get(id);
-      if (!m || out.has(id)) continue;
-      out.add(id);
-      const options = optionsOf(m);
-      open.push(...m.uses.filter((u) => !options.has(u) || chosen.has(u)));
-    }
+  const chosen = choicesOf(body, item);
+  const open = item.op === "step" ? [item.use] : [...item.looked];
+  for (let id = open.pop(); id !== undefined; id = open.pop()) {
+    const m = methods.get(id);
+    if (!m || out.has(id)) continue;
+    out.add(id);
+    const options = optionsOf(m);
+    open.push(...m.uses.filter((u) => !options.has(u) || chosen.has(u)));
   }
   return out;
 }

@@ -1,4 +1,4 @@
-import { isComputed, literals, nodesOf, type StudyRecord } from "../study/index.js";
+import { isComputed, literals, nodesOf, type Item, type StudyRecord } from "../study/index.js";
 import { joined, showNumber } from "./show.js";
 import type { Context } from "./context.js";
 import type { OpenItem } from "./view.js";
@@ -19,11 +19,11 @@ export function openItems(ctx: Context, record: StudyRecord): OpenItem[] {
     add("Stale: something it stands on was recorded again or withdrawn after it.", id, true);
   for (const i of items) {
     if (i.op === "assumed" && i.verify?.required)
-      add(`Assumption not verified. ${i.verify.how} (${i.verify.by}).`, i.id, true);
+      add(`Assumption not verified. To verify: ${i.verify.how} (${i.verify.by}).`, i.id, true);
     if (i.op === "check" && !("stop" in i.result) && i.result.value === "fail")
-      add("The check fails.", i.id, false);
+      add(`The check fails; ${takenUp(items, i.id, ctx)}.`, i.id, false);
     if (i.op === "check" && "stop" in i.result)
-      add("The check could not be evaluated.", i.id, false);
+      add(`The check could not be evaluated; ${takenUp(items, i.id, ctx)}.`, i.id, false);
     if (isComputed(i)) {
       const stated = nodesOf(i).flatMap(([name, node]) => literals(node, name));
       if (stated.length > 0)
@@ -40,4 +40,14 @@ export function openItems(ctx: Context, record: StudyRecord): OpenItem[] {
     }
   }
   return out;
+}
+
+/** Which conclusions take a check up: a failing check that none speaks of is what a checker must see. */
+function takenUp(items: readonly Item[], check: string, ctx: Context): string {
+  const all = items.flatMap((i) =>
+    i.op === "conclude" && i.checks.includes(check) ? [ctx.numbering.of(i.id)] : [],
+  );
+  return all.length === 0
+    ? "no conclusion takes it up"
+    : `taken up in ${all.length === 1 ? "conclusion" : "conclusions"} ${all.join(", ")}`;
 }

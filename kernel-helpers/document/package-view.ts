@@ -1,4 +1,5 @@
 import { isStated, type DeclaredMethod, type Item, type StudyRecord } from "../study/index.js";
+import { aligned } from "./align.js";
 import { cautionsOf } from "./cautions.js";
 import { checkView } from "./checks.js";
 import { conclusionView } from "./conclusions.js";
@@ -6,12 +7,14 @@ import { Context } from "./context.js";
 import type { Chart } from "./figures/chart.js";
 import { figureView } from "./figure.js";
 import { assumptionView, inputView } from "./inputs.js";
-import { appliedBy, methodsApplied } from "./methods-applied.js";
+import { appliedBy, methodsApplied, methodsOf } from "./methods-applied.js";
+import { findingText } from "./item-texts.js";
 import { methodView, modelView } from "./method-views.js";
 import { openItems } from "./open-items.js";
 import { comparisonView } from "./comparison-view.js";
 import { objectView } from "./object-view.js";
 import { formulaView, stepView } from "./steps.js";
+import { sentenceCase } from "./sentence-case.js";
 import { recordedTable } from "./tables.js";
 import type { Block, Link, PackageView, SectionView } from "./view.js";
 
@@ -24,19 +27,17 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
   const blocking = open.filter((o) => o.blocksApproval).length;
 
   const used = new Map<string, Link[]>();
-  for (const item of body.items)
-    if ("use" in item)
-      used.set(item.use, [...(used.get(item.use) ?? []), ctx.numbering.link(item.id)]);
+  for (const item of body.items) {
+    if (item.op !== "step" && item.op !== "run") continue;
+    for (const id of item.op === "step" ? methodsOf(body, item) : [item.use])
+      used.set(id, [...(used.get(id) ?? []), ctx.numbering.link(item.id)]);
+  }
   const applied = methodsApplied(body);
   const methods = body.declared.filter(
     (d): d is DeclaredMethod => d.role === "method" && applied.has(d.id),
   );
   const models = body.declared.filter((d) => d.role === "model");
   const composed = new Map(models.map((m) => [m.id, appliedBy(body, m.id)]));
-  const numberOf = new Map([
-    ...methods.map((d, i) => [d.id, `M${i + 1}`] as const),
-    ...models.map((d, i) => [d.id, `P${i + 1}`] as const),
-  ]);
   const cited = new Set(
     methods.flatMap((m) => [m.source.cite, ...m.checks.map((c) => c.from.cite)]),
   );
@@ -45,7 +46,7 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
   const throughModels = (id: string): Link[] =>
     models
       .filter((m) => (composed.get(m.id) ?? applied).has(id))
-      .map((m) => ({ text: numberOf.get(m.id) ?? m.id, to: `method-${m.id}` }));
+      .map((m) => ({ text: ctx.numbering.methodNumber(m.id), to: `method-${m.id}` }));
 
   const block = (item: Item): Block | null => {
     switch (item.op) {
@@ -54,10 +55,10 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
       case "conclude":
         return null;
       case "step":
-        return stepView(ctx, item, numberOf.get(item.use) ?? "");
+        return stepView(ctx, item);
       case "run":
       case "entity":
-        return objectView(ctx, item, numberOf.get(item.use) ?? null);
+        return objectView(ctx, item);
       case "formula":
         return formulaView(ctx, item);
       case "compare":
@@ -65,7 +66,12 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
       case "check":
         return checkView(ctx, item);
       case "caution":
-        return { kind: "caution", anchor: ctx.numbering.anchor(item.id), text: item.text };
+        return {
+          kind: "caution",
+          number: ctx.numbering.of(item.id),
+          anchor: ctx.numbering.anchor(item.id),
+          text: item.text,
+        };
       case "figure":
         return figureView(ctx, item, charts);
       case "table":
@@ -83,7 +89,7 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
     },
     ...body.sections.map((s) => ({
       anchor: `section-${s.id}`,
-      title: s.title,
+      title: sentenceCase(s.title),
       about: s.about,
       blocks: blocksIn(s.id),
     })),
@@ -102,9 +108,11 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
           : []),
         "not signed",
       ],
+      recorded: `${run.at.slice(0, 10)} ${run.at.slice(11, 16)} UTC`,
+      hash,
       prepared: study.prepared,
-      checked: study.checked ?? "not yet",
-      approved: study.approved ?? "not yet",
+      checked: study.checked ?? "not named",
+      approved: study.approved ?? "not named",
       disclaimer: study.disclaimer,
     },
     revisions: [{ revision: study.revision, what: "This issue.", hash: hash.slice(0, 16) }],
@@ -116,28 +124,22 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
       "findings" in i
         ? i.findings
             .filter((f) => f.code !== "pass-the-reference")
-            .map((f) => ({ text: f.says, at: ctx.numbering.titled(i.id) }))
+            .map((f) => ({ text: findingText(ctx, f), at: ctx.numbering.titled(i.id) }))
         : [],
     ),
-    inputs: body.items.flatMap((i) => (isStated(i) && i.op === "given" ? [inputView(ctx, i)] : [])),
-    assumptions: body.items.flatMap((i) =>
-      isStated(i) && i.op === "assumed" ? [assumptionView(ctx, i)] : [],
+    inputs: aligned(
+      body.items.flatMap((i) => (isStated(i) && i.op === "given" ? [inputView(ctx, i)] : [])),
+    ),
+    assumptions: aligned(
+      body.items.flatMap((i) =>
+        isStated(i) && i.op === "assumed" ? [assumptionView(ctx, i)] : [],
+      ),
     ),
     methods: methods.map((m) =>
-      methodView(m, numberOf.get(m.id) ?? "", citations, [
-        ...(used.get(m.id) ?? []),
-        ...throughModels(m.id),
-      ]),
+      methodView(ctx, m, citations, [...(used.get(m.id) ?? []), ...throughModels(m.id)]),
     ),
     models: models.map((m) =>
-      modelView(
-        ctx,
-        m,
-        numberOf.get(m.id) ?? "",
-        composed.get(m.id) ?? applied,
-        (id) => numberOf.get(id) ?? "",
-        used.get(m.id) ?? [],
-      ),
+      modelView(ctx, m, composed.get(m.id) ?? applied, used.get(m.id) ?? []),
     ),
     sections,
     comparisons: body.items.flatMap((i) => (i.op === "compare" ? [comparisonView(ctx, i)] : [])),
@@ -150,7 +152,7 @@ export function packageView(record: StudyRecord, charts: readonly Chart[]): Pack
     })),
     software: [
       ...Object.entries(run.versions).map(([name, value]) => ({ name, value })),
-      { name: "run at", value: run.at },
+      { name: "recorded at (UTC)", value: run.at },
       ...(run.notebook
         ? [
             { name: "notebook", value: run.notebook.name },

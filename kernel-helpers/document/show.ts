@@ -16,6 +16,8 @@ import {
 export interface ShownValue {
   readonly text: string;
   readonly unit: string;
+  /** How it is set: one number, which lines up on the decimal point, a range of numbers, or words. */
+  readonly form: "number" | "range" | "words";
 }
 
 /** Significant digits of a computed number: inputs are shown as typed. */
@@ -30,9 +32,10 @@ export function showNumber(
   unit?: string | null,
 ): ShownValue {
   const u = unit ? unitOf(kind, unit, "display") : displayUnit(kind, system, si);
-  return { text: formatNumber(inUnit(si as never, u), DIGITS), unit: symbolOf(u) };
+  return { text: formatNumber(inUnit(si as never, u), DIGITS), unit: symbolOf(u), form: "number" };
 }
-export const joined = ({ text, unit }: ShownValue): string =>
+export const inWords = (text: string): ShownValue => ({ text, unit: "", form: "words" });
+export const joined = ({ text, unit }: Omit<ShownValue, "form">): string =>
   unit === "" ? text : unit === "°" ? `${text}${unit}` : `${text}\u00a0${unit}`;
 
 /** A column of numbers in one unit, all with the same decimals, so that the decimal points line up. */
@@ -68,16 +71,16 @@ export function showValue(
   system: DisplaySystem,
   unit?: string | null,
 ): ShownValue {
-  if (value === null) return { text: "none", unit: "" };
+  if (value === null) return inWords("none");
   if (isKind(type)) return showNumber(type, value as number, system, unit);
   switch (type.type) {
     case "oneOf":
     case "text":
-      return { text: textOf(value), unit: "" };
+      return inWords(textOf(value));
     case "optional":
       return showValue(type.of, value, system, unit);
     case "list":
-      return { text: `${(value as readonly PlainJson[]).length} entries`, unit: "" };
+      return inWords(`${(value as readonly PlainJson[]).length} entries`);
     case "profile": {
       const { value: values } = value as { value: readonly number[] };
       const low = Math.min(...values);
@@ -89,20 +92,19 @@ export function showValue(
       return {
         text: a === b ? `${a ?? ""} throughout` : `${a ?? ""} to ${b ?? ""}`,
         unit: symbolOf(u),
+        form: "range",
       };
     }
     case "struct":
     case "anyOf": {
       const name = (value as { name?: PlainJson }).name;
-      return {
-        text:
-          typeof name === "string"
-            ? name
-            : type.type === "struct"
-              ? type.id.replace(/-/g, " ")
-              : "object",
-        unit: "",
-      };
+      return inWords(
+        typeof name === "string"
+          ? name
+          : type.type === "struct"
+            ? type.id.replace(/-/g, " ")
+            : "object",
+      );
     }
   }
 }

@@ -2,8 +2,10 @@ import { formulaToTex, parseFormula } from "../method/index.js";
 import type { AppliedUse, FormulaItem, Item, Result, TypeJson } from "../study/index.js";
 import { isKind, kinds } from "../units/index.js";
 import { words, type Context } from "./context.js";
+import { aligned } from "./align.js";
 import { equationOf, putInOf } from "./equation-of.js";
 import { saysOf, stopText } from "./item-texts.js";
+import { sentenceCase } from "./sentence-case.js";
 import { putIn } from "./tex-put-in.js";
 import { texNumber } from "./tex-number.js";
 import type { Row, StepView } from "./view.js";
@@ -11,6 +13,11 @@ import type { Row, StepView } from "./view.js";
 function resultRow(ctx: Context, item: Item, symbol: string | null, meaning: string): Row | null {
   const r = ctx.resolver.ofItem(item);
   return "stop" in r ? null : ctx.row(symbol, meaning, r);
+}
+/** Arguments and result of a step, their decimal points in line. */
+function linedUp(rows: readonly Row[], result: Row | null): Pick<StepView, "rows" | "result"> {
+  const all = aligned(result ? [...rows, result] : rows);
+  return { rows: all.slice(0, rows.length), result: result && (all.at(-1) ?? result) };
 }
 /** What equations show: the coherent SI numbers of the arguments that have a symbol. */
 function numbersFor(
@@ -33,7 +40,7 @@ const equals = (result: Result, kind: TypeJson): string => {
   return `=${texNumber(result.value)}${si === "1" ? "" : String.raw`\ \mathrm{${si.replace(/ /g, String.raw`\,`).replace(/(\d)/g, "^$1")}}`}`;
 };
 
-export function stepView(ctx: Context, item: AppliedUse, methodNumber: string): StepView {
+export function stepView(ctx: Context, item: AppliedUse): StepView {
   const m = ctx.resolver.declaration(item.use);
   if (m.role !== "method") throw new Error(`${item.id} is no step`);
   const symbols = new Map(
@@ -45,18 +52,17 @@ export function stepView(ctx: Context, item: AppliedUse, methodNumber: string): 
     kind: "step",
     number: ctx.numbering.of(item.id),
     anchor: ctx.numbering.anchor(item.id),
-    title: item.title,
-    method: { text: `${methodNumber} ${m.title}`, to: `method-${m.id}` },
+    title: sentenceCase(item.title),
+    method: ctx.numbering.method(m.id),
     cite: m.source.cite === "derivation" ? null : m.source.cite,
     equation: equationOf(symbol, m.tex),
     putIn:
       "stop" in item.result
         ? null
         : putInOf(symbol, putIn(m.tex, numbers), equals(item.result, item.type)),
-    rows: ctx.rows(item.args, m.inputs),
-    result: resultRow(ctx, item, symbol, m.result.note),
+    ...linedUp(ctx.rows(item.args, m.inputs), resultRow(ctx, item, symbol, m.result.note)),
     stop: stopText(item.result),
-    findings: saysOf(item),
+    findings: saysOf(ctx, item),
     usedBy: ctx.usedBy(item.id),
   };
 }
@@ -69,7 +75,9 @@ export function formulaView(ctx: Context, item: FormulaItem): StepView {
       const from = node && "ref" in node ? ctx.resolver.item(node.ref) : null;
       const symbol =
         (node && "ref" in node && node.path.length === 0 ? from?.symbol : null) ?? nameTex(n);
-      return [n, { type: kind, symbol, note: from?.title ?? words(n) }];
+      const parts = node && "ref" in node ? ctx.partsOf(node) : [];
+      const note = from ? [from.title, ...parts].join(", ") : words(n);
+      return [n, { type: kind, symbol, note }];
     }),
   );
   const symbolOf = (n: string): string => fields[n]?.symbol ?? nameTex(n);
@@ -85,7 +93,7 @@ export function formulaView(ctx: Context, item: FormulaItem): StepView {
     kind: "step",
     number: ctx.numbering.of(item.id),
     anchor: ctx.numbering.anchor(item.id),
-    title: item.title,
+    title: sentenceCase(item.title),
     method: null,
     cite: null,
     equation: `${symbol}=${formulaToTex(formula, symbolOf)}`,
@@ -93,16 +101,18 @@ export function formulaView(ctx: Context, item: FormulaItem): StepView {
       "stop" in item.result
         ? null
         : `${symbol}=${formulaToTex(formula, numberOf)}${equals(item.result, item.type)}`,
-    rows: ctx.rows(item.args, fields),
-    result: resultRow(ctx, item, symbol, item.title),
+    ...linedUp(ctx.rows(item.args, fields), resultRow(ctx, item, symbol, item.title)),
     stop: stopText(item.result),
-    findings: saysOf(item),
+    findings: saysOf(ctx, item),
     usedBy: ctx.usedBy(item.id),
   };
 }
-/** `v_t` → v_{t}; a word is set upright. */
+const GREEK =
+  /^(?:alpha|beta|gamma|delta|epsilon|zeta|eta|theta|kappa|lambda|mu|nu|xi|pi|rho|sigma|tau|phi|chi|psi|omega)$/;
+/** `v_t` → v_{t}, `rho_s` → ρ_{s}; a word is set upright. */
 const nameTex = (name: string): string => {
   const [head = "", ...rest] = name.split(/[_-]/);
-  const base = head.length === 1 ? head : String.raw`\mathrm{${head}}`;
+  const isLetter = head.length === 1;
+  const base = isLetter ? head : GREEK.test(head) ? `\\${head}` : String.raw`\mathrm{${head}}`;
   return rest.length === 0 ? base : String.raw`${base}_{\mathrm{${rest.join(String.raw`\,`)}}}`;
 };

@@ -1,6 +1,13 @@
-import type { Node, PlainJson, TableItem, TypeJson } from "../study/index.js";
-import { isKind } from "../units/index.js";
-import { words, type Context } from "./context.js";
+import {
+  isStated,
+  type Node,
+  type PlainJson,
+  type TableItem,
+  type TypeJson,
+} from "../study/index.js";
+import { formatTyped, isKind } from "../units/index.js";
+import { paddings } from "./align.js";
+import { sayStop, words, type Context } from "./context.js";
 import type { Resolved } from "./resolve.js";
 import { joined, showColumn } from "./show.js";
 import type { TableView } from "./view.js";
@@ -12,6 +19,7 @@ export interface Column {
   readonly cells: readonly string[];
   /** Where each value comes from. */
   readonly links?: readonly (string | null)[];
+  readonly notes?: readonly string[];
 }
 
 /** A column of values of one type, formatted together. */
@@ -47,13 +55,19 @@ export function tableOf(
   parts: Pick<TableView, "number" | "anchor" | "caption">,
 ): TableView {
   const length = Math.max(0, ...columns.map((c) => c.cells.length));
+  const unseen = columns.map((c) => (c.numeric ? paddings(c.cells) : []));
   return {
     kind: "table",
     ...parts,
     columns: columns.map(({ head, unit, numeric }) => ({ head, unit, numeric })),
     rows: Array.from({ length }, (_, i) =>
-      columns.map((c) => ({ text: c.cells[i] ?? "–", to: c.links?.[i] ?? null })),
+      columns.map((c, k) => ({
+        text: c.cells[i] ?? "–",
+        to: c.links?.[i] ?? null,
+        padding: unseen[k]?.[i] ?? "",
+      })),
     ),
+    notes: [...new Set(columns.flatMap((c) => c.notes ?? []))],
   };
 }
 
@@ -95,12 +109,30 @@ export function tableOfNodes(
     });
     return [
       {
-        ...column(ctx, words(name), f.type, values),
+        ...(typedColumn(ctx, words(name), here) ?? column(ctx, words(name), f.type, values)),
         links: here.map((n) => ctx.from(n)?.to ?? null),
       },
     ];
   });
   return tableOf(columns, parts);
+}
+
+/** Stated numbers of one unit as they were typed, so that the reader finds them again among the inputs. */
+function typedColumn(ctx: Context, head: string, nodes: readonly Node[]): Column | null {
+  const typed = nodes.map((n) => {
+    if ("absent" in n) return null;
+    const item = "ref" in n && n.path.length === 0 ? ctx.resolver.item(n.ref) : undefined;
+    return item && isStated(item) && item.form === "number" ? item : undefined;
+  });
+  const units = new Set(typed.flatMap((t) => (t === null ? [] : [t?.unit])));
+  const [unit] = units;
+  if (units.size !== 1 || unit === undefined) return null;
+  return {
+    head,
+    unit: unit === "1" ? "" : unit,
+    numeric: true,
+    cells: typed.map((t) => (t ? formatTyped(t.typed) : "–")),
+  };
 }
 
 /** Rows that tell something: the ends, and those that differ from a neighbour. */
@@ -162,16 +194,29 @@ function rowsColumn(
   unit: string | null,
 ): Column {
   const all = nodes.map((n) => ctx.resolver.resolve(n, "dimensionless"));
-  const kinds = new Set(all.map((r) => ("stop" in r ? "stop" : JSON.stringify(r.type))));
-  const [first] = all;
-  if (kinds.size === 1 && first && !("stop" in first))
-    return column(
+  const known = all.flatMap((r) => ("stop" in r ? [] : [r]));
+  const [first] = known;
+  if (first && new Set(known.map((r) => JSON.stringify(r.type))).size === 1) {
+    const shown = column(
       ctx,
       head,
       first.type,
       all.map((r) => ("stop" in r ? undefined : r.value)),
       unit,
     );
+    return {
+      ...shown,
+      cells: all.map((r, i) => ("stop" in r ? "no value" : (shown.cells[i] ?? "–"))),
+      notes: nodes.flatMap((n, i) => {
+        const r = all[i];
+        return r && "stop" in r
+          ? [
+              `No value (${ctx.from(n)?.text.split(",")[0] ?? "stated in place"}): ${sayStop(r.stop)}, ${r.because}.`,
+            ]
+          : [];
+      }),
+    };
+  }
   return {
     head,
     unit: "",

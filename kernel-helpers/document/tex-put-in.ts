@@ -5,7 +5,7 @@ const tight = (tex: string): string[] => tokens(tex).filter((t) => !/^\s+$/.test
 
 /**
  * An equation with numbers in place of its symbols. Symbols are matched token by token, the longest
- * first; a subscripted name is not mistaken for its bare letter, and upright words are left alone.
+ * first; a subscripted name is not mistaken for its bare letter, nor a letter within an upright word for a symbol.
  */
 export function putIn(tex: string, values: ReadonlyMap<string, string>): string {
   const wanted = [...values]
@@ -16,16 +16,16 @@ export function putIn(tex: string, values: ReadonlyMap<string, string>): string 
   const out: string[] = [];
   for (let i = 0; i < all.length;) {
     const t = all[i] ?? "";
-    if (OPAQUE.has(t)) {
-      const end = groupEnd(all, i + 1);
-      out.push(all.slice(i, end).join(""));
-      i = end;
-      continue;
-    }
     const hit = wanted.map((w) => ({ w, end: match(all, i, w.parts) })).find(({ end }) => end > 0);
     if (hit && (all[hit.end] ?? "") !== "_") {
       out.push(`{(${hit.w.number})}`);
       i = hit.end;
+      continue;
+    }
+    if (OPAQUE.has(t)) {
+      const end = groupEnd(all, i + 1);
+      out.push(all.slice(i, end).join(""));
+      i = end;
       continue;
     }
     if (all[i + 1] === "_" && /^(\\[A-Za-z]+|[A-Za-z])$/.test(t)) {

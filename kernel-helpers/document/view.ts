@@ -12,21 +12,24 @@ export type TextRun = {
   readonly strong: boolean;
 };
 
-export interface Row {
-  readonly symbol: string | null;
-  readonly meaning: string;
+/** A value in a column: how it is set, and the unseen digits behind it that line the decimal points up. */
+export interface Aligned {
   readonly value: string;
   readonly unit: string;
+  readonly form: "number" | "range" | "words";
+  readonly padding: string;
+}
+export interface Row extends Aligned {
+  readonly symbol: string | null;
+  readonly meaning: string;
   /** Where the value comes from; null when it is stated in place. */
   readonly from: Link | null;
 }
-export interface InputView {
+export interface InputView extends Aligned {
   readonly number: string;
   readonly anchor: string;
   readonly title: string;
   readonly symbol: string | null;
-  readonly value: string;
-  readonly unit: string;
   readonly spread: string | null;
   readonly because: string;
   readonly file: string | null;
@@ -45,6 +48,8 @@ export interface CheckView {
   readonly anchor: string;
   readonly title: string;
   readonly value: string;
+  /** The same for a column of values. */
+  readonly shown: Aligned;
   readonly sense: string;
   readonly limit: string;
   readonly valueFrom: Link | null;
@@ -63,6 +68,8 @@ export interface ConclusionView {
   readonly stands: boolean;
   readonly checks: readonly CheckView[];
   readonly assumptions: readonly Link[];
+  /** Those of the assumptions that must be verified before approval. */
+  readonly unverified: readonly Link[];
   readonly inputs: readonly Link[];
 }
 export interface StepView {
@@ -109,6 +116,7 @@ export interface TableCell {
   readonly text: string;
   /** Where the value comes from. */
   readonly to: string | null;
+  readonly padding: string;
 }
 export interface TableView {
   readonly kind: "table";
@@ -121,6 +129,8 @@ export interface TableView {
     readonly numeric: boolean;
   }[];
   readonly rows: readonly (readonly TableCell[])[];
+  /** What the reader must know about the entries. */
+  readonly notes: readonly string[];
 }
 export interface Series {
   readonly label: string;
@@ -162,6 +172,7 @@ export interface FigureView {
 }
 export interface CautionView {
   readonly kind: "caution";
+  readonly number: string;
   readonly anchor: string;
   readonly text: string;
 }
@@ -223,6 +234,9 @@ export interface PackageView {
     readonly revision: string;
     readonly status: string;
     readonly statusBecause: readonly string[];
+    /** When the record was made, UTC. */
+    readonly recorded: string;
+    readonly hash: string;
     readonly prepared: string;
     readonly checked: string;
     readonly approved: string;

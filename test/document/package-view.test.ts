@@ -35,7 +35,7 @@ describe("the view of a record", () => {
       /^\\mathrm\{Re\}=\\frac\{\{\(850\)\} \{\(.+\)\} \{\(0\.1524\)\}\}\{\{\(0\.005\)\}\}=/,
     );
     expect(step.rows.map((r) => r.from?.text)).toEqual([
-      "S1, speed",
+      "S1, in the first section",
       "A1",
       "O1, density",
       "O1, viscosity",
@@ -69,11 +69,33 @@ describe("the view of a record", () => {
   it("lists what is open: unverified assumptions, numbers stated in place, failing checks", () => {
     const texts = view.open.map((o) => o.text);
     expect(
-      texts.some((t) => t.startsWith("Assumption not verified. run a caliper (wireline engineer)")),
+      texts.some((t) =>
+        t.startsWith("Assumption not verified. To verify: run a caliper (wireline engineer)"),
+      ),
     ).toBe(true);
     expect(texts.some((t) => t.startsWith("States"))).toBe(true);
     expect(view.cover.statusBecause.some((t) => /\d+ open items must be closed/.test(t))).toBe(
       true,
+    );
+  });
+  it("says which conclusion takes up a check that fails", () => {
+    const failing = view.open.filter((o) => o.text.startsWith("The check fails"));
+    expect(failing.map((o) => [o.at?.text.split(" ")[0], o.text])).toEqual([
+      ["K1", "The check fails; taken up in conclusion C1."],
+    ]);
+  });
+  it("names in a conclusion the checks that fail, and the assumptions that approval waits for", () => {
+    expect(view.conclusions[0]?.standing).toBe("1 of its 2 checks passes: K1 fails");
+    expect(view.conclusions[0]?.unverified).toEqual([{ text: "A1", to: "item-bore" }]);
+  });
+  it("lists under a method the steps and the models that used it", () => {
+    expect(view.methods.map((m) => [m.number, m.usedIn.map((l) => l.text)])).toEqual([
+      ["M1", ["S2", "P1"]],
+    ]);
+  });
+  it("says a range that was left with the number and title of the method", () => {
+    expect(view.limits.map((l) => l.text)[0]).toMatch(
+      /^M1 Reynolds number: Re .*; the source states 1 to 1000$/,
     );
   });
   it("says of a draft that it is one", () => {
@@ -97,7 +119,7 @@ describe("the view of a stop", () => {
   it("shows the reason in place of a value, and evaluates no check", () => {
     const v = packageView(stopped, []);
     const run = v.sections.flatMap((s) => s.blocks).find((b) => b.anchor === "item-q");
-    expect(run).toMatchObject({ stop: "No value (no flow): the column outweighs the reservoir." });
+    expect(run).toMatchObject({ stop: "no flow: the column outweighs the reservoir." });
     expect(v.conclusions[0]?.checks.map((c) => c.verdict)).toEqual([
       "not evaluated",
       "not evaluated",

@@ -16,6 +16,11 @@ describe("numbers put into an equation", () => {
     [String.raw`\rho_s-\rho`, { "\\rho": "700", "\\rho_s": "7850" }, "{(7850)}-{(700)}"],
     [String.raw`d_v+d`, { d: "1" }, "d_v+{(1)}"],
     [String.raw`D^2`, { D: "3" }, "{(3)}^2"],
+    [
+      String.raw`\frac{2.51}{\mathrm{Re}\sqrt f}+\mathrm{Re}_m`,
+      { "\\mathrm{Re}": "4000" },
+      String.raw`\frac{2.51}{{(4000)}\sqrt f}+\mathrm{Re}_m`,
+    ],
     [String.raw`\mathrm{Re}\,e`, { e: "1", R: "2" }, String.raw`\mathrm{Re}\,{(1)}`],
     [
       String.raw`\operatorname{max}(m,a)`,
@@ -39,11 +44,24 @@ describe("an equation", () => {
   });
 });
 
+describe("the result of an equation", () => {
+  it("stands behind a single relation", () => {
+    expect(putInOf("v", String.raw`\frac{4{(2)}}{\pi}`, "=3")).toBe(
+      String.raw`v=\frac{4{(2)}}{\pi}=3`,
+    );
+  });
+  it("is never said of a relation that follows", () => {
+    expect(putInOf("f", String.raw`1-\lambda^{1.5},\quad\lambda=\frac{{(1)}}{{(2)}}`, "=0.6")).toBe(
+      String.raw`f=1-\lambda^{1.5},\quad\lambda=\frac{{(1)}}{{(2)}}\qquad f=0.6`,
+    );
+  });
+});
+
 describe("a number in TeX", () => {
   it.each([
     [0, "0"],
-    [12345.678, "12346"],
-    [0.0012345678, "0.0012346"],
+    [12345.678, "12345.7"],
+    [0.0012345678, "0.00123457"],
     [0.00012, String.raw`1.2\times 10^{-4}`],
     [-4.5e7, String.raw`-4.5\times 10^{7}`],
     [1, "1"],

@@ -8,7 +8,7 @@ import { fontCss, mathCss } from "../fonts/index.js";
 import { typesetHtml } from "../lettering/index.js";
 import { mathRenderer } from "../math/index.js";
 import type { PaperSize } from "../pdf/page-css.js";
-import { contentsOf, exhibitsOf } from "./contents.js";
+import { contentsOf, exhibitsOf, headingsOf } from "./contents.js";
 import { drawingSvg } from "./drawing-svg.js";
 import { strictView } from "./strict-view.js";
 import { packageStyles } from "./styles.js";
@@ -55,6 +55,7 @@ export async function renderHtml(record: StudyRecord, paper: PaperSize): Promise
   const html = fill(environment, {
     pkg: strictView(view, "pkg"),
     contents: strictView(contentsOf(view), "contents"),
+    headings: strictView(headingsOf(view), "headings"),
     exhibits: strictView(exhibitsOf(view), "exhibits"),
     styles: `${FONTS}\n${packageStyles(folder, view, paper)}`,
   });

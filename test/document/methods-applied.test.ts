@@ -1,0 +1,60 @@
+import { describe, expect, it } from "vitest";
+import { methodsApplied } from "../../kernel-helpers/document/methods-applied.js";
+import { method, oneOf } from "../../kernel-helpers/method/index.js";
+import { Study } from "../../kernel-helpers/study/index.js";
+import { mps } from "../../kernel-helpers/units/index.js";
+
+const law = (id: string, factor: number) =>
+  method({
+    id,
+    revision: 1,
+    family: "test",
+    title: `Law ${factor}`,
+    tex: `${factor}x`,
+    source: { cite: "derivation", where: "definition" },
+    inputs: { x: { kind: "velocity", symbol: "x", note: "speed" } },
+    output: { kind: "velocity", symbol: "y", note: "speed" },
+    compute: ({ x }) => factor * x,
+    checks: [],
+  });
+const first = law("law-one", 1);
+const second = law("law-two", 2);
+const third = law("law-three", 3);
+const chooser = method({
+  id: "law-chosen",
+  revision: 1,
+  family: "test",
+  title: "By a law",
+  tex: "y(x)",
+  source: { cite: "derivation", where: "definition" },
+  uses: [first, second, third],
+  inputs: {
+    x: { kind: "velocity", symbol: "x", note: "speed" },
+    law: { kind: oneOf("law-one", "law-two", "law-three"), note: "law" },
+  },
+  output: { kind: "velocity", symbol: "y", note: "speed" },
+  compute: ({ x, law: name }) =>
+    (name === "law-one" ? first : name === "law-two" ? second : third).si({ x }),
+  checks: [],
+});
+
+describe("methods that took part", () => {
+  it("include every law that a method was told to use, and none that it was not", () => {
+    const s = new Study({
+      id: "laws",
+      title: "Laws",
+      number: "L-1",
+      revision: "A",
+      purpose: "To choose.",
+      decision: "None.",
+      prepared: "analyst",
+    });
+    s.step("by-one", chooser, { x: mps(1), law: "law-one" });
+    s.step("by-two", chooser, { x: mps(1), law: "law-two" });
+    expect([...methodsApplied(s.record().body)].sort()).toEqual([
+      "law-chosen",
+      "law-one",
+      "law-two",
+    ]);
+  });
+});
