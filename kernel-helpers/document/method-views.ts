@@ -17,6 +17,16 @@ const checkText = (
   return `${cite}${from.where}: ${BASIS[basis] ?? basis}, ${rows} value${rows === 1 ? "" : "s"}`;
 };
 
+/** Typed words with their letters and powers of ten as print has them: `Re_m 2e5` → Reₘ 2 × 10⁵. */
+const settled = (text: string): string =>
+  text
+    .replace(/\bRe_m\b/g, "Reₘ")
+    .replace(
+      /\b(\d+(?:\.\d+)?)e(\d)\b/g,
+      (_, mantissa: string, power: string) =>
+        `${mantissa}\u00a0×\u00a010${"⁰¹²³⁴⁵⁶⁷⁸⁹".charAt(Number(power))}`,
+    );
+
 /** The ranges of a method, those of one meaning together; of laws it chooses among, those in use. */
 function rangesOf(ctx: Context, m: DeclaredMethod): string[] {
   const out = new Map<string, string[]>();
@@ -61,7 +71,7 @@ export function methodView(
     checks: m.checks.map((c) => checkText(c, citations)),
     direction:
       m.direction &&
-      `Safe side for ${m.direction.safeFor}; unsafe side for ${m.direction.unsafeFor}.`,
+      settled(`Safe side for ${m.direction.safeFor}; unsafe side for ${m.direction.unsafeFor}.`),
     usedIn,
   };
 }
