@@ -4,6 +4,6 @@ import type { PackageView } from "../document/index.js";
 export function sayConclusions(view: PackageView): string[] {
   return view.conclusions.flatMap((c) => [
     `${c.number}  ${c.sentence.map((r) => r.text).join("")}`,
-    `    ${c.stands ? "✓" : "✗"} ${c.standing}`,
+    `    ${c.standing}`,
   ]);
 }
