@@ -31,8 +31,8 @@ export const descentChart = chart({
       value: of.value.map((x) => inUnit(x as never, unit)),
     }));
     const stands = [
-      { at: d.standsAt, label: "stands still, favourable" },
-      { at: d.standsAtLow, label: "stands still, unfavourable" },
+      { at: d.standsAt, label: "no deeper, favourable" },
+      { at: d.standsAtLow, label: "no deeper, unfavourable" },
     ];
     return {
       drawing: {

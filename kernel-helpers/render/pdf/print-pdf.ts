@@ -1,3 +1,4 @@
+import type { PDFDocument } from "pdf-lib";
 import { InputError, RenderError } from "../../errors/index.js";
 import type { BrowserKind, BrowserSession, LockedPage } from "../browser/index.js";
 import { anchorPages } from "./anchor-pages.js";
@@ -49,8 +50,8 @@ export async function printPdf({
       expected: "a valid Date",
     });
   return session.withPage(html, async (page) => {
-    const { raw, passes } = await printSettled(page);
-    const { bytes, pages } = await finish(raw, info);
+    const { pdf, passes } = await printSettled(page);
+    const { bytes, pages } = await finish(pdf, info);
     return {
       bytes,
       pages,
@@ -72,22 +73,22 @@ const emptied = `((all) => {
 })(${equations})`;
 const refilled = `${equations}.forEach((e) => Object.assign(e.style, { height: "", contentVisibility: "" }))`;
 
-async function printSettled(page: LockedPage): Promise<{ raw: Uint8Array; passes: number }> {
+async function printSettled(page: LockedPage): Promise<{ pdf: PDFDocument; passes: number }> {
   const wanted = await page.evaluate(`${spans}.map((e) => String(e.getAttribute("data-page-of")))`);
   if (!isListOfText(wanted) || wanted.length === 0)
-    return { raw: await page.pdf({ isTagged: true }), passes: 1 };
+    return { pdf: await load(await page.pdf({ isTagged: true })), passes: 1 };
   // The first pass only finds the pages: it goes without tags, which take as long as the rest, and
   // with each equation as an empty box of its own height. The next pass checks what it found.
   await page.evaluate(emptied);
-  let numbers = await pagesOf(wanted, await page.pdf({ isTagged: false }));
+  let numbers = await pagesOf(wanted, await load(await page.pdf({ isTagged: false })));
   await page.evaluate(refilled);
   for (let passes = 2; passes <= maxPasses; passes++) {
     await page.evaluate(
       `((numbers) => ${spans}.forEach((e, i) => { e.textContent = numbers[i]; }))(${JSON.stringify(numbers)})`,
     );
-    const raw = await page.pdf({ isTagged: true });
-    const now = await pagesOf(wanted, raw);
-    if (now.every((n, i) => n === numbers[i])) return { raw, passes };
+    const pdf = await load(await page.pdf({ isTagged: true }));
+    const now = await pagesOf(wanted, pdf);
+    if (now.every((n, i) => n === numbers[i])) return { pdf, passes };
     numbers = now;
   }
   throw new RenderError({
@@ -98,9 +99,14 @@ async function printSettled(page: LockedPage): Promise<{ raw: Uint8Array; passes
   });
 }
 
-async function pagesOf(ids: readonly string[], pdf: Uint8Array): Promise<readonly string[]> {
+/** Loads in one go: by default the library rests after every hundred objects. */
+async function load(raw: Uint8Array): Promise<PDFDocument> {
   const { PDFDocument } = await import("pdf-lib");
-  const pages = await anchorPages(await PDFDocument.load(pdf, { updateMetadata: false }));
+  return PDFDocument.load(raw, { updateMetadata: false, parseSpeed: Number.POSITIVE_INFINITY });
+}
+
+async function pagesOf(ids: readonly string[], pdf: PDFDocument): Promise<readonly string[]> {
+  const pages = await anchorPages(pdf);
   return ids.map((id) => {
     const page = pages.get(id);
     if (page !== undefined) return String(page);
@@ -115,14 +121,9 @@ async function pagesOf(ids: readonly string[], pdf: Uint8Array): Promise<readonl
 
 /** Sets what the file says of itself, packs its objects (a third of the size) and checks its text. */
 async function finish(
-  raw: Uint8Array,
+  pdf: PDFDocument,
   info: PdfInfo,
 ): Promise<{ bytes: Uint8Array; pages: number }> {
-  const { PDFDocument } = await import("pdf-lib");
-  const pdf = await PDFDocument.load(raw, {
-    updateMetadata: false,
-    parseSpeed: Number.POSITIVE_INFINITY,
-  });
   const { fonts, pages } = await pdfFacts(pdf);
   if (fonts.length === 0)
     throw new RenderError({
