@@ -7,7 +7,7 @@ import { pageCss, pageOfPages, type PaperSize } from "../pdf/page-css.js";
 export function packageStyles(folder: string, { cover }: PackageView, size: PaperSize): string {
   const read = (name: string): string => readFileSync(join(folder, name), "utf8");
   return [
-    read("look.css"),
+    ...["look.css", "tables.css", "maths.css", "blocks.css", "phone.css"].map(read),
     read("print.css"),
     pageCss({
       size,

@@ -24,7 +24,7 @@ describe("on paper, where nothing scrolls", () => {
       .map((tex) => `<div class="eq">${math({ tex, isDisplay: true })}</div>`)
       .join("");
     // A4 less the margins of the page is 168 mm, 635 px.
-    const html = `<!doctype html><style>${mathCss({ covering: body })}${style("look.css")}${style("print.css")}
+    const html = `<!doctype html><style>${mathCss({ covering: body })}${style("look.css")}${style("maths.css")}${style("print.css")}
       body{width:635px}</style><main>${body}</main>`;
     const tooWide = await withBrowser((session) =>
       session.withPage(html, (page) =>
