@@ -22,7 +22,7 @@ export interface Reference {
   readonly note?: string;
 }
 
-const byId = new Map((references as unknown as readonly Reference[]).map((r) => [r.id, r]));
+const byId = new Map((references as readonly Reference[]).map((r) => [r.id, r]));
 
 /** The work that a source cites. */
 export function reference(id: string): Reference {

@@ -6,16 +6,14 @@ import { models } from "./registry.js";
 
 /** Everything a record of this version can have used. */
 export const standardRegistry: readonly (Use | Struct)[] = [
-  ...(methods as unknown as readonly Use[]),
-  ...(models as unknown as readonly Use[]),
-  ...([
-    Liquid,
-    SolidMaterial,
-    Sphere,
-    Rod,
-    FallingBody,
-    Grade,
-    BoreSection,
-    Well,
-  ] as unknown as readonly Struct[]),
+  ...methods,
+  ...models,
+  Liquid,
+  SolidMaterial,
+  Sphere,
+  Rod,
+  FallingBody,
+  Grade,
+  BoreSection,
+  Well,
 ];

@@ -58,6 +58,11 @@ export interface DeclaredEntity extends Declared {
 }
 export type Declaration = DeclaredMethod | DeclaredModel | DeclaredEntity;
 
+// The role tells: only `method()` and `model()` make uses of theirs.
+const isMethod = (use: Use): use is Use & MethodFacts => use.role === "method" && "tex" in use;
+const isModel = (use: Use): use is Use & ModelFacts => use.role === "model" && "about" in use;
+type ModelFacts = Pick<Model, "about" | "tolerances" | "cautions" | "uses"> & { output: Struct };
+
 /** Everything the uses of a record declare, once each, sorted by id: methods, models, and the structs of their types. */
 export function declaredBy(uses: Iterable<Use | Struct>): Declaration[] {
   const found = new Map<string, Declaration>();
@@ -85,29 +90,29 @@ export function declaredBy(uses: Iterable<Use | Struct>): Declaration[] {
     found.set(u.id, declaredMethod(u));
     u.uses.forEach(addMethod);
   };
+  const addModel = (m: Use & ModelFacts): void => {
+    if (found.get(m.id)?.role === "model") return;
+    found.set(m.id, {
+      role: "model",
+      id: m.id,
+      revision: m.revision,
+      title: m.title,
+      inputs: declaredFields(m.inputs),
+      about: m.about,
+      results: declaredFields(m.output.fields),
+      uses: m.uses.map(({ id, revision }) => ({ id, revision })),
+      tolerances: m.tolerances,
+      cautions: m.cautions ?? [],
+    });
+    addStructs(m.inputs);
+    addStructs(m.output.fields);
+    m.uses.forEach(addMethod);
+  };
   for (const use of uses) {
     if (!("role" in use)) addType(use);
-    else if (use.role === "entity") addType(use.output);
-    else if (use.role === "method") addMethod(use as unknown as MethodFacts);
-    else {
-      const m = use as unknown as Model;
-      if (found.get(m.id)?.role === "model") continue;
-      found.set(m.id, {
-        role: "model",
-        id: m.id,
-        revision: m.revision,
-        title: m.title,
-        inputs: declaredFields(m.inputs),
-        about: m.about,
-        results: declaredFields(m.output.fields),
-        uses: m.uses.map(({ id, revision }) => ({ id, revision })),
-        tolerances: m.tolerances,
-        cautions: m.cautions ?? [],
-      });
-      addStructs(m.inputs);
-      addStructs(m.output.fields);
-      m.uses.forEach(addMethod);
-    }
+    else if (isMethod(use)) addMethod(use);
+    else if (isModel(use)) addModel(use);
+    else addType(use.output);
   }
   return [...found.values()].sort((a, b) => (a.id < b.id ? -1 : 1));
 }

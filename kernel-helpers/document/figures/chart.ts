@@ -11,7 +11,7 @@ export interface Drawn {
 }
 /** A chart: what it draws of which values, as data in display units. The pixels are the renderer's. */
 export interface Chart<S extends Shape = Shape> extends ChartUse<S> {
-  readonly draw: (values: Plains<S>, system: DisplaySystem) => Drawn;
+  draw(values: Plains<S>, system: DisplaySystem): Drawn;
 }
 
 export const chart = <S extends Shape>(parts: {

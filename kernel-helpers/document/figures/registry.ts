@@ -2,4 +2,4 @@ import type { Chart } from "./chart.js";
 import { descentChart } from "./descent-chart.js";
 import { cutChart, packChart } from "./pack-chart.js";
 
-export const charts = [descentChart, packChart, cutChart] as unknown as readonly Chart[];
+export const charts: readonly Chart[] = [descentChart, packChart, cutChart];

@@ -4,8 +4,12 @@ import type { Expression, Formula } from "./expression.js";
 
 const NONE: Dimension = [0, 0, 0, 0];
 const G: Dimension = [0, 1, -2, 0];
-const map = (d: Dimension, f: (x: number, i: number) => number): Dimension =>
-  d.map(f) as unknown as Dimension;
+const map = ([M, L, T, K]: Dimension, f: (x: number, i: number) => number): Dimension => [
+  f(M, 0),
+  f(L, 1),
+  f(T, 2),
+  f(K, 3),
+];
 const same = (a: Dimension, b: Dimension): boolean =>
   a.every((x, i) => Math.abs(x - (b[i] ?? 0)) < 1e-12);
 
